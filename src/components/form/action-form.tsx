@@ -1,0 +1,116 @@
+"use client";
+
+import { zodResolver } from "@hookform/resolvers/zod";
+import { startTransition, useActionState, useEffect, useId, useRef, type ReactNode } from "react";
+import { get, useForm, type FieldErrors, type FieldValues } from "react-hook-form";
+import type { z } from "zod";
+import { Button } from "../button";
+import { ErrorSummary } from "./error-summary";
+import { FormProvider, type FormAction } from "./form-state";
+
+/**
+ * A form that is checked by one schema on both sides, works without script,
+ * keeps what was typed, and puts every refusal beside its field with the same
+ * words as in the summary on top.
+ */
+export function ActionForm({
+  schema, action, submitLabel, start = {}, hidden = {}, extraButtons, children, onDone,
+}: Readonly<{
+  schema: z.ZodType<FieldValues, FieldValues>;
+  action: FormAction;
+  submitLabel: string;
+  /** What stands in the fields at first, by field name. */
+  start?: Readonly<Record<string, string | ReadonlyArray<string>>>;
+  hidden?: Readonly<Record<string, string>>;
+  extraButtons?: ReactNode;
+  children?: ReactNode;
+  onDone?: (data: unknown) => void;
+}>) {
+  const [state, dispatch, isBusy] = useActionState(action, null);
+  const formId = useId();
+  const formRef = useRef<HTMLFormElement>(null);
+  const form = useForm<FieldValues>({
+    resolver: zodResolver(schema),
+    shouldFocusError: false,
+    defaultValues: { ...nested(start), ...nested(hidden) },
+  });
+  const { errors, submitCount } = form.formState;
+  const refused = state && !state.ok ? state : null;
+
+  useEffect(() => {
+    if (state?.ok) onDone?.(state.data);
+  }, [state, onDone]);
+
+  const errorOf = (name: string): string | undefined => {
+    const own = (get(errors, name) as { message?: string; root?: { message?: string } } | undefined);
+    return own?.message ?? own?.root?.message ?? refused?.fields[name]?.[0];
+  };
+  const items = [...clientItems(errors), ...Object.entries(refused?.fields ?? {}).map(([name, all]) => ({ name, message: all[0] ?? "" }))];
+  const summary = items.length > 0 ? uniqueByName(items) : [];
+
+  return (
+    <FormProvider
+      value={{
+        register: form.register,
+        errorOf,
+        startOf: (name) => refused?.typed[name] ?? [start[name] ?? []].flat().join("|"),
+        isBusy,
+      }}
+    >
+      <form
+        id={formId}
+        ref={formRef}
+        action={dispatch}
+        noValidate
+        onSubmit={(event) => {
+          event.preventDefault();
+          if (isBusy) return;
+          const submitter = (event.nativeEvent as SubmitEvent).submitter;
+          const data = new FormData(event.currentTarget, submitter);
+          void form.handleSubmit(() => startTransition(() => dispatch(data)))(event);
+        }}
+        className="mt-6 max-w-text"
+      >
+        {summary.length > 0 || refused ? (
+          <ErrorSummary key={`${submitCount}-${refused ? JSON.stringify(refused.fields) : ""}`} message={refused?.message} items={summary} />
+        ) : null}
+        {Object.entries(hidden).map(([name, value]) => <input key={name} type="hidden" {...form.register(name)} defaultValue={value} />)}
+        {children}
+        <div className="mt-6 flex flex-wrap gap-3">
+          <Button isBusy={isBusy}>{isBusy ? "Saving …" : submitLabel}</Button>
+          {extraButtons}
+        </div>
+      </form>
+    </FormProvider>
+  );
+}
+
+type Item = { name: string; message: string };
+
+function clientItems(errors: FieldErrors, path = ""): Item[] {
+  return Object.entries(errors).flatMap(([key, value]) => {
+    if (!value || typeof value !== "object") return [];
+    const name = path ? `${path}.${key}` : key;
+    const message = (value as { message?: unknown }).message;
+    if (typeof message === "string") return [{ name, message }];
+    return key === "ref" ? [] : clientItems(value as FieldErrors, name);
+  });
+}
+
+function uniqueByName(items: Item[]): Item[] {
+  return [...new Map(items.toReversed().map((item) => [item.name, item])).values()].toReversed();
+}
+
+/** {"a.0.b": "x"} as {a: [{b: "x"}]}, which is how the form library keeps its values. */
+function nested(flat: Readonly<Record<string, string | ReadonlyArray<string>>>): FieldValues {
+  const result: FieldValues = {};
+  for (const [path, value] of Object.entries(flat)) {
+    const keys = path.split(".");
+    let at = result as Record<string, unknown>;
+    keys.forEach((key, i) => {
+      if (i === keys.length - 1) at[key] = value;
+      else at = (at[key] ??= /^\d+$/.test(keys[i + 1] ?? "") ? [] : {}) as Record<string, unknown>;
+    });
+  }
+  return result;
+}

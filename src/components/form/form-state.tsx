@@ -1,0 +1,31 @@
+"use client";
+
+import { createContext, useContext } from "react";
+import type { UseFormRegister, FieldValues } from "react-hook-form";
+
+/** What the server said of the last send; the shape that every form action returns. */
+export type FormState =
+  | null
+  | { ok: true; data: unknown }
+  | { ok: false; code: string; message: string; fields: Record<string, string[]>; typed: Record<string, string> };
+
+export type FormAction = (previous: FormState, form: FormData) => Promise<FormState>;
+
+type FormContextValue = Readonly<{
+  register: UseFormRegister<FieldValues>;
+  /** The one sentence beside a field, from the browser's check or the server's. */
+  errorOf: (name: string) => string | undefined;
+  /** What stands in the field at first: what was typed before, or the given start. */
+  startOf: (name: string) => string | undefined;
+  isBusy: boolean;
+}>;
+
+const FormContext = createContext<FormContextValue | null>(null);
+
+export const FormProvider = FormContext.Provider;
+
+export function useFormContext(): FormContextValue {
+  const value = useContext(FormContext);
+  if (!value) throw new Error("a field stands outside a form");
+  return value;
+}

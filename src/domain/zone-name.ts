@@ -1,0 +1,9 @@
+/** Whether this is a name of the IANA zone list that this platform knows. */
+export function isZone(name: string): boolean {
+  try {
+    new Intl.DateTimeFormat("en", { timeZone: name });
+    return /^[A-Za-z]/.test(name);
+  } catch {
+    return false;
+  }
+}
