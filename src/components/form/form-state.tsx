@@ -2,12 +2,13 @@
 
 import { createContext, useContext } from "react";
 import type { UseFormRegister, FieldValues } from "react-hook-form";
+import type { ErrorCode } from "@/domain/errors";
 
 /** What the server said of the last send; the shape that every form action returns. */
 export type FormState =
   | null
   | { ok: true; data: unknown }
-  | { ok: false; code: string; message: string; fields: Record<string, string[]>; typed: Record<string, string> };
+  | { ok: false; code: ErrorCode; message: string; fields: Record<string, string[]>; typed: Record<string, string> };
 
 export type FormAction = (previous: FormState, form: FormData) => Promise<FormState>;
 
