@@ -5,7 +5,8 @@ import { ensureBuild, isBuilt } from "./commands/build.mjs";
 import { backup, restore } from "./commands/copies.mjs";
 import { migrate, openDatabase, seed } from "./commands/database.mjs";
 import { assertDependencies, assertNode, ensureDependencies } from "./commands/dependencies.mjs";
-import { commonEnvironment, servingEnvironment } from "./commands/environment.mjs";
+import { buildEnvironment, commonEnvironment } from "./commands/environment.mjs";
+import { clearLeftovers } from "./commands/leftovers.mjs";
 import { end, endOnSignals, isEnding, onEnd } from "./commands/lifecycle.mjs";
 import { DATA, makeDataFolder, PlainMessage, say } from "./commands/place.mjs";
 import { assertPortFree, freePort } from "./commands/ports.mjs";
@@ -20,6 +21,7 @@ let killChildren = () => undefined;
 /** Start the application: built (default), with hot reload (--dev), or only what is there (--serve). */
 async function serve({ mode }, settings) {
   const port = Number(settings.PORT ?? 3000);
+  await clearLeftovers(port);
   await assertPortFree(port, `PORT=${port + 1} npm ${mode === "start" ? "start" : `run ${mode}`}`);
   if (mode === "serve") assertDependencies();
   else await ensureDependencies();
@@ -32,7 +34,7 @@ async function serve({ mode }, settings) {
   const env = commonEnvironment(settings, database, { nodeEnv, port, mailUrl });
   await migrate(env);
   if (mode !== "serve" && database.isPrivate && env.DEMO === "on") await seed(env);
-  if (mode === "start") await ensureBuild(servingEnvironment(env));
+  if (mode === "start") await ensureBuild(buildEnvironment(settings));
 
   const onDeath = (name, code) => {
     if (isEnding()) return;
@@ -54,6 +56,12 @@ function announce(env, mailUrl) {
   for (const { name, role } of people) say(`  ${name}, ${role}`);
   if (mailUrl) say(`Letters it writes are kept at ${mailUrl}`);
   say("Ctrl-C stops everything that was started here.\n");
+}
+
+async function build(settings) {
+  await ensureDependencies();
+  if (!(await ensureBuild(buildEnvironment(settings)))) say("The build is up to date.");
+  return 0;
 }
 
 /** Run one of our TypeScript files beside the database: benchmarks, faults, tokens. */
@@ -82,6 +90,7 @@ await atEdge(async () => {
   assertNode();
   makeDataFolder();
   const settings = readSettings();
+  if (task.mode === "build") return build(settings);
   if (task.mode === "run") return runFile(task, settings);
   if (task.mode === "backup") return backup(await openDatabase(settings), task.file).then(() => 0);
   if (task.mode === "restore") return restoreFile(task, settings);

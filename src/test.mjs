@@ -3,7 +3,7 @@ import { ensureBuild } from "./commands/build.mjs";
 import { checkTypes, lint, runVitest, testEnvironment } from "./commands/checks.mjs";
 import { assertNode, ensureDependencies } from "./commands/dependencies.mjs";
 import { atEdge } from "./commands/edge.mjs";
-import { localSecrets } from "./commands/environment.mjs";
+import { buildEnvironment } from "./commands/environment.mjs";
 import { countOne, openLedger } from "./commands/ledger.mjs";
 import { endOnSignals, onEnd, withoutBreak } from "./commands/lifecycle.mjs";
 import { DATA, makeDataFolder, PlainMessage } from "./commands/place.mjs";
@@ -32,7 +32,7 @@ async function vitest(args) {
 
 /** The same build as `npm start` makes, so that one serves both. */
 async function build() {
-  await ensureBuild({ ...testEnvironment(), ...localSecrets(), NODE_ENV: "production" });
+  await ensureBuild(buildEnvironment(testEnvironment()));
   return countOne(true);
 }
 

@@ -1,6 +1,7 @@
 import { join } from "node:path";
 import { servingEnvironment } from "./environment.mjs";
 import { startChildren } from "./children.mjs";
+import { noteRunning } from "./leftovers.mjs";
 import { PlainMessage, ROOT } from "./place.mjs";
 import { typescriptArgs } from "./typescript.mjs";
 
@@ -23,7 +24,10 @@ export function startApplication(common, { port, mailPort, isDev = false, onDeat
     args: typescriptArgs("src/testing/fakes/mail-server.ts"),
     env: { ...env, MAIL_FAKE_PORT: String(mailPort) },
   };
-  return startChildren(mailPort ? [mail, web, worker] : [web, worker], { onDeath, write });
+  const children = startChildren(mailPort ? [mail, web, worker] : [web, worker], { onDeath, write });
+  const forget = noteRunning(port, children.pids);
+  const stop = () => children.stop().then(forget);
+  return { stop, kill: children.kill };
 }
 
 /** Wait until the application says that it and its database are ready. @throws {PlainMessage} after two minutes */

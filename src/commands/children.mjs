@@ -12,7 +12,7 @@ const PATIENCE_MS = 15_000;
  * @param {{ name: string, args: string[], env: NodeJS.ProcessEnv }[]} programs arguments for Node itself
  * @param {{ onDeath: (name: string, code: number | null) => void, write?: (line: string) => void }} options
  *   `onDeath` is told of one that ends unasked
- * @returns {{ stop: () => Promise<void>, kill: () => void }}
+ * @returns {{ pids: number[], stop: () => Promise<void>, kill: () => void }}
  */
 export function startChildren(programs, { onDeath, write = say }) {
   let isStopping = false;
@@ -41,13 +41,13 @@ export function startChildren(programs, { onDeath, write = say }) {
     clearTimeout(timer);
     signal("SIGKILL");
   };
-  return { stop, kill: () => signal("SIGKILL") };
+  return { pids: children.map(({ child }) => child.pid), stop, kill: () => signal("SIGKILL") };
 }
 
 /** A process and whatever it started. The last call, after its end, sweeps up what it may have left. */
-function signalGroup(pid, name) {
+export function signalGroup(pid, name) {
   try {
-    process.kill(-pid, name);
+    process.kill(-Number(pid), name);
   } catch (error) {
     if (error.code !== "ESRCH") throw error;
   }

@@ -1,5 +1,5 @@
 import { spawn } from "node:child_process";
-import { chmodSync, existsSync, mkdirSync, renameSync, rmSync, statSync } from "node:fs";
+import { existsSync, mkdirSync, renameSync, rmSync, statSync } from "node:fs";
 import { dirname, join, resolve } from "node:path";
 import { DATA, PlainMessage, say } from "./place.mjs";
 import { findPostgres } from "./postgres-binaries.mjs";
@@ -27,6 +27,7 @@ export async function backup({ ownerUrl, bin }, wanted) {
   const stamp = new Date().toISOString().slice(0, 19).replaceAll(":", "").replace("T", "-");
   const file = wanted ? resolve(process.env.INIT_CWD ?? ".", wanted) : join(DATA, "backups", `notchbook-${stamp}.dump`);
   if (existsSync(file)) throw new PlainMessage(`${file} is already there. Choose another name.`);
+  process.umask(0o077);
   mkdirSync(dirname(file), { recursive: true });
   const draft = `${file}.partial`;
   const programs = bin ?? (await findPostgres());
@@ -35,7 +36,6 @@ export async function backup({ ownerUrl, bin }, wanted) {
     rmSync(draft, { force: true });
     throw new PlainMessage(`pg_dump ended with code ${code}; nothing was saved.`);
   }
-  chmodSync(draft, 0o600);
   renameSync(draft, file);
   say(`Saved ${megabytes(file)} to ${file}\nIt holds every journal: keep it as private as they are.`);
 }
@@ -66,7 +66,7 @@ function pourInto(programs, url, file) {
     });
     const reader = spawn(join(programs, "pg_restore"), ["-f", "-", "--no-owner", "--no-acl", file], { stdio: ["ignore", "pipe", "inherit"] });
     psql.stdin.on("error", () => reader.kill());
-    psql.stdin.write(`set client_min_messages = warning; begin; ${EMPTY_IT}`);
+    psql.stdin.write(`set client_min_messages = warning; set lock_timeout = '10s'; begin; ${EMPTY_IT}`);
     reader.stdout.pipe(psql.stdin, { end: false });
     reader.on("close", (code) => psql.stdin.end(code === 0 ? "\ncommit;\n" : ""));
     psql.on("close", (code) => {

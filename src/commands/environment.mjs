@@ -46,7 +46,13 @@ export function commonEnvironment(settings, database, { nodeEnv, port, mailUrl }
   };
 }
 
-/** The same for web and worker, without the owner's way into the database. Empty, so that no .env brings it back. */
+/** The environment of a build, which needs no database; the local run, the tests and `npm run build` share one. */
+export function buildEnvironment(settings) {
+  const secrets = settings.DATABASE_URL ? {} : localSecrets();
+  return { ...process.env, ...secrets, ...settings, NODE_ENV: "production", NEXT_TELEMETRY_DISABLED: "1" };
+}
+
+/** The common environment for web and worker, without the owner's way into the database. Empty, so that no .env brings it back. */
 export function servingEnvironment(common) {
   return { ...common, DATABASE_URL: "" };
 }

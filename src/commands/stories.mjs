@@ -6,6 +6,7 @@ import { runPlaywright } from "./checks.mjs";
 import { canSandbox, findChromium } from "./chromium.mjs";
 import { migrate, seed } from "./database.mjs";
 import { commonEnvironment } from "./environment.mjs";
+import { clearLeftovers } from "./leftovers.mjs";
 import { isEnding, onEnd } from "./lifecycle.mjs";
 import { DATA, PlainMessage, say } from "./place.mjs";
 import { assertPortFree, freePort } from "./ports.mjs";
@@ -28,6 +29,7 @@ const SETTINGS = {
  */
 export async function tellStories(postgres, args, extra = {}) {
   const port = Number(process.env.E2E_PORT ?? 3100);
+  await clearLeftovers(port);
   await assertPortFree(port, `E2E_PORT=${port + 1} npm test`);
   const chromium = await findChromium();
   const name = port === 3100 ? "notchbook_e2e" : `notchbook_e2e_${port}`;

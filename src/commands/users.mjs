@@ -2,7 +2,7 @@ import { mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from "nod
 import { join } from "node:path";
 
 /** A process's number with the moment it started, so that a number given out again is not mistaken for it. */
-function identity(pid) {
+export function identity(pid) {
   try {
     const stat = readFileSync(`/proc/${pid}/stat`, "utf8");
     return `${pid} ${stat.slice(stat.lastIndexOf(")") + 2).split(" ")[19]}`;
