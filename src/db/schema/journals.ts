@@ -72,6 +72,8 @@ export const invitations = pgTable(
       .references(() => users.id),
     createdAt: timestamp({ withTimezone: true }).notNull(),
     expiresAt: timestamp({ withTimezone: true }).notNull(),
+    /** When the grant it leads to ends; null for one without an end. */
+    grantExpiresAt: timestamp({ withTimezone: true }),
     acceptedAt: timestamp({ withTimezone: true }),
     acceptedBy: uuid().references(() => users.id),
     revokedAt: timestamp({ withTimezone: true }),

@@ -1,4 +1,5 @@
-import { index, integer, jsonb, pgTable, primaryKey, smallint, text, timestamp, uuid } from "drizzle-orm/pg-core";
+import { boolean, index, integer, jsonb, pgTable, primaryKey, smallint, text, timestamp, uuid } from "drizzle-orm/pg-core";
+import type { DigestBasis, DigestLevel } from "@/domain/digest/basis";
 import { users } from "./people";
 
 export type OutboxState = "waiting" | "sent" | "dropped" | "dead";
@@ -33,9 +34,7 @@ export const outbox = pgTable(
   (t) => [index("outbox_due").on(t.state, t.nextAttemptAt)],
 );
 
-export type DigestLevel = "off" | "links" | "summary" | "full";
-
-/** How much of a week a reader wants by e-mail, and when in their own zone. No row: links, Monday 08:00. */
+/** How much of a week a reader wants by e-mail, and when in their own zone. No row: links, Monday 08:00, told of comments. */
 export const digestPreferences = pgTable("digest_preferences", {
   userId: uuid()
     .primaryKey()
@@ -44,6 +43,8 @@ export const digestPreferences = pgTable("digest_preferences", {
   /** 1 Monday … 7 Sunday. */
   weekday: smallint().notNull(),
   minuteOfDay: smallint().notNull(),
+  /** Whether a new comment is told by e-mail, without its text. */
+  isToldOfComments: boolean().notNull().default(true),
   updatedAt: timestamp({ withTimezone: true }).notNull(),
 });
 
@@ -56,6 +57,8 @@ export const digests = pgTable(
       .references(() => users.id, { onDelete: "cascade" }),
     isoWeek: text().notNull(),
     outboxId: uuid().notNull(),
+    /** The level and grants it was written under; no longer so at sending, it is not sent. */
+    basis: jsonb().$type<DigestBasis>().notNull(),
     createdAt: timestamp({ withTimezone: true }).notNull(),
   },
   (t) => [primaryKey({ columns: [t.userId, t.isoWeek] })],
