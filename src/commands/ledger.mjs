@@ -27,18 +27,19 @@ export function openLedger() {
     try {
       counts = await act();
     } catch (error) {
-      if (isEnding()) return false;
-      say(error instanceof PlainMessage ? error.message : (error.stack ?? String(error)));
+      if (!isEnding()) say(error instanceof PlainMessage ? error.message : (error.stack ?? String(error)));
       counts = countOne(false);
     }
+    if (isEnding()) return false;
     const seconds = ((performance.now() - startedAt) / 1000).toFixed(1);
     entries.push({ name, counts, seconds });
     say(`== ${name}: ${words(counts)} (${seconds} s)`);
     return counts.failed === 0;
   }
 
-  /** Print every step again and the closing line. @returns the command's exit code */
+  /** Print every step again and the closing line, which an interrupted run does not get. @returns the command's exit code */
   function close() {
+    if (isEnding()) return 130;
     const total = { passed: 0, failed: 0, skipped: 0 };
     say("");
     for (const { name, counts, seconds } of entries) {
