@@ -38,7 +38,10 @@ async function createQueues(ownerUrl: string): Promise<void> {
   const boss = new PgBoss({ connectionString: ownerUrl, supervise: false, schedule: false });
   boss.on("error", () => undefined);
   await boss.start();
-  for (const { name, options } of QUEUES) await boss.createQueue(name, { name, ...options });
+  for (const { name, options } of QUEUES) {
+    await boss.createQueue(name, { name, ...options });
+    await boss.updateQueue(name, { name, ...options });
+  }
   await boss.stop({ graceful: false });
 }
 

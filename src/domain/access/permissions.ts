@@ -36,6 +36,10 @@ const TABLE = {
   "credential.submit": { to: "verified" },
   "credential.verify": { to: "administrator" },
 
+  "digest.choose": { to: "verified" },
+  "mailbox.read": { to: "anyone" },
+
+  "digest.send": { to: "journal", roles: [], jobs: DIGEST },
   "journal.read": { to: "journal", roles: CIRCLE, jobs: DIGEST },
   "journal.edit": { to: "journal", roles: PERSON },
   "draft.read": { to: "journal", roles: PERSON },
