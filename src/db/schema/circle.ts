@@ -1,8 +1,7 @@
 import { index, pgTable, primaryKey, text, timestamp, uuid } from "drizzle-orm/pg-core";
+import type { CommentSubject } from "@/domain/access/comment-subject";
 import { journals } from "./journals";
 import { users } from "./people";
-
-export type CommentSubject = "version" | "day" | "comparison";
 
 /** A comment or question. `subjectKey` is a version number or an ISO date. */
 export const comments = pgTable(
