@@ -57,7 +57,7 @@ export const VERSION_STATES = Object.keys(VERSION_EDGES) as VersionState[];
 /** The state after an event, or `null` when the event cannot happen in this state. */
 export function nextState(state: VersionState, event: VersionEvent): VersionState | null {
   const edges: Partial<Record<VersionEvent, VersionState>> = VERSION_EDGES[state];
-  return edges[event] ?? null;
+  return (Object.hasOwn(edges, event) ? edges[event] : null) ?? null;
 }
 
 /**

@@ -5,9 +5,10 @@ import { toNumber } from "./fraction";
 import type { GuardrailFacts, Spoken } from "./guardrail-facts";
 import type { GuardrailLimits } from "./guardrail-table";
 
+/** A device's own numbers have no known scale, so a percentage of them says nothing. */
 function largestStepPercent({ difference }: GuardrailFacts, family?: SettingFamily): number {
   const steps = difference.changes
-    .filter((change) => family === undefined || change.family === family)
+    .filter((change) => change.family !== "features" && (family === undefined || change.family === family))
     .flatMap(({ stepPercent }) => stepPercent ?? []);
   return Math.max(0, ...steps);
 }
