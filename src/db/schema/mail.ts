@@ -20,6 +20,8 @@ export const outbox = pgTable(
     html: text().notNull(),
     text: text().notNull(),
     headers: jsonb().$type<Record<string, string>>().notNull(),
+    /** The level and grants a digest was written under; no longer so at sending, it is not sent. */
+    basis: jsonb().$type<DigestBasis>(),
     dedupeKey: text().notNull().unique(),
     state: text().$type<OutboxState>().notNull(),
     attempts: integer().notNull().default(0),
@@ -57,8 +59,6 @@ export const digests = pgTable(
       .references(() => users.id, { onDelete: "cascade" }),
     isoWeek: text().notNull(),
     outboxId: uuid().notNull(),
-    /** The level and grants it was written under; no longer so at sending, it is not sent. */
-    basis: jsonb().$type<DigestBasis>().notNull(),
     createdAt: timestamp({ withTimezone: true }).notNull(),
   },
   (t) => [primaryKey({ columns: [t.userId, t.isoWeek] })],
