@@ -1,7 +1,10 @@
-import { desc, eq } from "drizzle-orm";
+import { and, desc, eq, lt, notLike } from "drizzle-orm";
 import type { Db } from "@/db/client";
 import { accessLog } from "@/db/schema/journals";
 import { users } from "@/db/schema/people";
+
+/** How the log calls a read that went out by mail. */
+export const BY_MAIL = "by e-mail: ";
 
 export async function insertAccess(db: Db, access: typeof accessLog.$inferInsert): Promise<void> {
   await db.insert(accessLog).values(access);
@@ -16,4 +19,15 @@ export async function listAccess(db: Db, journalId: string, limit: number) {
     .where(eq(accessLog.journalId, journalId))
     .orderBy(desc(accessLog.at))
     .limit(limit);
+}
+
+/** When somebody last looked for themselves, before `before`: what was sent to them by mail does not count. */
+export async function findLastLook(db: Db, journalId: string, userId: string, before: Date): Promise<Date | null> {
+  const [row] = await db
+    .select({ at: accessLog.at })
+    .from(accessLog)
+    .where(and(eq(accessLog.journalId, journalId), eq(accessLog.userId, userId), lt(accessLog.at, before), notLike(accessLog.what, `${BY_MAIL}%`)))
+    .orderBy(desc(accessLog.at))
+    .limit(1);
+  return row?.at ?? null;
 }

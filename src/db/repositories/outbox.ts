@@ -1,8 +1,11 @@
 import { and, asc, desc, eq, isNull, lt, lte, or, sql } from "drizzle-orm";
 import type { Db } from "@/db/client";
 import { outbox } from "@/db/schema/mail";
+import type { DigestBasis } from "@/domain/digest/basis";
 
 export type NewMail = {
+  /** Given where something else has to point at it. */
+  id?: string;
   kind: string;
   journalId?: string;
   recipientId?: string;
@@ -11,6 +14,7 @@ export type NewMail = {
   html: string;
   text: string;
   headers?: Record<string, string>;
+  basis?: DigestBasis;
   /** Same key, same mail: it is written once, however often this is called. */
   dedupeKey: string;
   requestId: string;

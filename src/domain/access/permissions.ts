@@ -56,7 +56,7 @@ const TABLE = {
   "glucose.import": { to: "journal", roles: PERSON },
   "comparison.read": { to: "journal", roles: CIRCLE, scope: "glucose", jobs: DIGEST },
 
-  "entry.read": { to: "journal", roles: CIRCLE, scope: "entries" },
+  "entry.read": { to: "journal", roles: CIRCLE, scope: "entries", jobs: DIGEST },
   "entry.log": { to: "journal", roles: ["person", "family"], scope: "entries" },
   "flag.set": { to: "journal", roles: ["person", "family"], scope: "entries" },
 

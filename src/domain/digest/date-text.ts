@@ -1,0 +1,35 @@
+const WORDS = new Intl.DateTimeFormat("en-GB", { weekday: "long", day: "numeric", month: "long", timeZone: "UTC" });
+
+function parts(format: Intl.DateTimeFormat, atMs: number): Record<string, string> {
+  return Object.fromEntries(format.formatToParts(atMs).map(({ type, value }) => [type, value]));
+}
+
+/** An ISO date in words, without its year: "2026-03-09" is "Monday 9 March". */
+export function dateText(isoDate: string): string {
+  const { weekday, day, month } = parts(WORDS, Date.parse(`${isoDate}T00:00:00Z`));
+  return `${weekday} ${day} ${month}`;
+}
+
+/** The same with its year, for dates that may lie far away: "9 March 2027". */
+export function longDateText(isoDate: string): string {
+  const { day, month } = parts(WORDS, Date.parse(`${isoDate}T00:00:00Z`));
+  return `${day} ${month} ${isoDate.slice(0, 4)}`;
+}
+
+/** The civil date of an instant in a zone, as an ISO date. */
+export function isoDateOf(at: Date, zone: string): string {
+  const { year, month, day } = parts(
+    new Intl.DateTimeFormat("en-GB", { year: "numeric", month: "2-digit", day: "2-digit", timeZone: zone }),
+    at.getTime(),
+  );
+  return `${year}-${month}-${day}`;
+}
+
+/** An instant on the clock of a zone: "Monday 9 March, 08:05". */
+export function momentText(at: Date, zone: string): string {
+  const { hour, minute } = parts(
+    new Intl.DateTimeFormat("en-GB", { hour: "2-digit", minute: "2-digit", hourCycle: "h23", timeZone: zone }),
+    at.getTime(),
+  );
+  return `${dateText(isoDateOf(at, zone))}, ${hour}:${minute}`;
+}
