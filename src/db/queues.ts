@@ -4,10 +4,11 @@
  * hands out scheduled jobs; left to itself it would make it at start, which
  * that role may not.
  *
- * Under "stately" at most one job with the same key waits and one is worked on.
+ * Under "short" at most one job with the same key waits; one that a killed worker
+ * left half done does not hold up the next.
  */
 export const QUEUES = [
   { name: "__pgboss__send-it", options: {} },
-  { name: "weekly-digest", options: { policy: "stately", retryLimit: 0 } },
-  { name: "digest-of-reader", options: { policy: "stately", retryLimit: 3, retryDelay: 30, retryBackoff: true } },
+  { name: "weekly-digest", options: { policy: "short", retryLimit: 0 } },
+  { name: "digest-of-reader", options: { policy: "short", retryLimit: 0 } },
 ] as const;

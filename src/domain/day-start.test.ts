@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { dayNumberOf, dayStart } from "./day-start";
+import { addDays, dayNumberOf, dayStart } from "./day-start";
 
 describe("dayStart", () => {
   it.each([
@@ -9,6 +9,11 @@ describe("dayStart", () => {
     ["2026-04-24", "Africa/Cairo", 0, "2026-04-23T22:00:00.000Z"],
   ])("%s in %s, %i days on, begins at %s", (date, zone, on, instant) => {
     expect(dayStart(date, zone, on).toISOString()).toBe(instant);
+  });
+
+  it("goes on and back over the end of a month", () => {
+    expect(addDays("2026-02-27", 3)).toBe("2026-03-02");
+    expect(addDays("2026-03-02", -7)).toBe("2026-02-23");
   });
 
   it("counts days from 1970", () => {

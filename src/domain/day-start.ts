@@ -12,6 +12,11 @@ export function dayStart(isoDate: string, zone: string, daysOn = 0): Date {
   return new Date(day.toZonedDateTime(zone).epochMilliseconds);
 }
 
+/** The civil date so many days on, negative to go back. */
+export function addDays(isoDate: string, days: number): string {
+  return Temporal.PlainDate.from(isoDate).add({ days }).toString();
+}
+
 /** Days since 1970-01-01 of a civil date. */
 export function dayNumberOf(isoDate: string): number {
   return Date.parse(`${isoDate}T00:00:00Z`) / 86_400_000;

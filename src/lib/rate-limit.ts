@@ -10,6 +10,7 @@ const LIMITS = {
   "reset-password": { points: 5, seconds: 60 * 60 },
   invite: { points: 30, seconds: 60 * 60 },
   import: { points: 60, seconds: 60 * 60 },
+  digest: { points: 6, seconds: 60 * 60 },
   comment: { points: 60, seconds: 60 * 60 },
   export: { points: 30, seconds: 60 * 60 },
 } as const;

@@ -3,8 +3,8 @@ import type { Db } from "@/db/client";
 import { accessLog } from "@/db/schema/journals";
 import { users } from "@/db/schema/people";
 
-/** How the log calls a read that went out by mail. */
-export const BY_MAIL = "by e-mail: ";
+/** How the log names what was read for a digest, at its head. */
+export const DIGEST_READ = "digest: ";
 
 export async function insertAccess(db: Db, access: typeof accessLog.$inferInsert): Promise<void> {
   await db.insert(accessLog).values(access);
@@ -21,12 +21,12 @@ export async function listAccess(db: Db, journalId: string, limit: number) {
     .limit(limit);
 }
 
-/** When somebody last looked for themselves, before `before`: what was sent to them by mail does not count. */
+/** When somebody last looked for themselves, before `before`: what a digest told them does not count. */
 export async function findLastLook(db: Db, journalId: string, userId: string, before: Date): Promise<Date | null> {
   const [row] = await db
     .select({ at: accessLog.at })
     .from(accessLog)
-    .where(and(eq(accessLog.journalId, journalId), eq(accessLog.userId, userId), lt(accessLog.at, before), notLike(accessLog.what, `${BY_MAIL}%`)))
+    .where(and(eq(accessLog.journalId, journalId), eq(accessLog.userId, userId), lt(accessLog.at, before), notLike(accessLog.what, `${DIGEST_READ}%`)))
     .orderBy(desc(accessLog.at))
     .limit(1);
   return row?.at ?? null;

@@ -26,7 +26,7 @@ function lowsPart(journals: ReadonlyArray<JournalWeek>, level: DigestData["level
 export function educatorSection(journals: ReadonlyArray<JournalWeek>, { level, today }: DigestData): DigestSection {
   const named = (line: (week: JournalWeek, name: string) => string[]) => journals.flatMap((week) => line(week, `${week.ownerName}: `));
   const waiting = named(({ waiting: all }, name) => all.map(({ versionNumber, since }) => `${name}version ${versionNumber} waits since ${dateText(since)}.`));
-  const followUps = named(({ followUps: all }, name) => all.map((one) => followUpLine(one, today, name)));
+  const followUps = journals.flatMap(({ followUps: all, ownerName }) => all.map((one) => followUpLine(one, today, ownerName)));
   const proposals: DigestPart[] = waiting.length > 0
     ? openPart("Proposals", waiting, level, "proposal waits for you", "proposals wait for you")
     : [{ title: "Proposals", lines: ["No proposal waits for you."] }];

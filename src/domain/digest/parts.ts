@@ -63,10 +63,11 @@ export function questionLines(week: JournalWeek, name = ""): string[] {
   return week.questions.map(({ askedBy, about }) => `${name}${askedBy} asks about ${about}.`);
 }
 
-export function followUpLine(followUp: FollowUp, today: string, name = ""): string {
+export function followUpLine(followUp: FollowUp, today: string, name?: string): string {
   const what = followUp.kind === "review" ? `next review of version ${followUp.versionNumber}` : `a look at version ${followUp.versionNumber}, as planned`;
-  const when = followUp.on < today ? `Due since ${dateText(followUp.on)}` : dateText(followUp.on);
-  return `${when}: ${name}${what}.`;
+  const isOverdue = followUp.on < today;
+  const when = isOverdue ? `${name ? "due" : "Due"} since ${dateText(followUp.on)}` : dateText(followUp.on);
+  return `${name ? `${name}, ` : ""}${when}: ${what}.`;
 }
 
 /** Open questions and follow-ups: counts at "links", lines at the other levels. */

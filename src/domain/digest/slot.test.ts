@@ -8,7 +8,7 @@ const at = (text: string) => Temporal.Instant.from(text).epochMilliseconds;
 describe("latestSlot", () => {
   it("is this Monday at eight, counted by hand in Oslo (UTC+1)", () => {
     expect(latestSlot(at("2026-03-09T07:00:00Z"), "Europe/Oslo", MONDAY_AT_EIGHT)).toEqual({
-      isoWeek: "2026-W11", atMs: at("2026-03-09T07:00:00Z"), from: "2026-03-02", to: "2026-03-08",
+      isoWeek: "2026-W11", atMs: at("2026-03-09T07:00:00Z"), on: "2026-03-09",
     });
   });
 

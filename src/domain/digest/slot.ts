@@ -1,13 +1,12 @@
 import { Temporal } from "@js-temporal/polyfill";
 
-/** The moment of a week at which a reader's digest falls due, and the days it is about. */
+/** The moment of a week at which a reader's digest falls due. */
 export type DigestSlot = Readonly<{
   /** ISO 8601 week of the reader's own calendar, such as "2026-W11": one digest each. */
   isoWeek: string;
   atMs: number;
-  /** First and last of the seven civil days before the slot, as ISO dates. */
-  from: string;
-  to: string;
+  /** The civil day it falls on, as ISO date; the digest tells of the seven days before. */
+  on: string;
 }>;
 
 /** A digest that is later than this is left out; the next one is near. */
@@ -36,8 +35,7 @@ function slotOn(date: Temporal.PlainDate, zone: string, minuteOfDay: number): Di
   return {
     isoWeek: `${date.yearOfWeek}-W${week}`,
     atMs: wall.toZonedDateTime(zone, { disambiguation: "compatible" }).epochMilliseconds,
-    from: date.subtract({ days: 7 }).toString(),
-    to: date.subtract({ days: 1 }).toString(),
+    on: date.toString(),
   };
 }
 

@@ -50,3 +50,9 @@ export type DigestPart = Readonly<{ title: string; lines: ReadonlyArray<string> 
 export type DigestSection = Readonly<{ heading: string; parts: ReadonlyArray<DigestPart>; path: string; pathLabel: string }>;
 
 export type Digest = Readonly<{ subject: string; heading: string; preview: string; sections: ReadonlyArray<DigestSection> }>;
+
+/**
+ * The sentences about what followed a version, from the comparison engine;
+ * null when there is nothing to say. Lent to the digest by whoever starts it.
+ */
+export type FindingOf = (journalId: string, versionNumber: number) => Promise<string | null>;
