@@ -1,12 +1,14 @@
 import { join } from "node:path";
 import { ensureBuild } from "./commands/build.mjs";
 import { checkTypes, lint, runVitest, testEnvironment } from "./commands/checks.mjs";
+import { findChromium } from "./commands/chromium.mjs";
 import { assertNode, ensureDependencies } from "./commands/dependencies.mjs";
 import { atEdge } from "./commands/edge.mjs";
 import { buildEnvironment } from "./commands/environment.mjs";
 import { countOne, openLedger } from "./commands/ledger.mjs";
 import { endOnSignals, onEnd, withoutBreak } from "./commands/lifecycle.mjs";
-import { DATA, makeDataFolder, PlainMessage } from "./commands/place.mjs";
+import { DATA, makeDataFolder, PlainMessage, say } from "./commands/place.mjs";
+import { findPostgres } from "./commands/postgres-binaries.mjs";
 import { tellStories } from "./commands/stories.mjs";
 import { ensurePostgres } from "./db/postgres.mjs";
 
@@ -44,7 +46,20 @@ async function stories(name, args, extra) {
   });
 }
 
+/** What the machine lacks is installed, or named, before minutes have gone into the first steps. */
+async function prepareMachine() {
+  for (const find of [findPostgres, findChromium]) {
+    try {
+      await find();
+    } catch (error) {
+      if (!(error instanceof PlainMessage)) throw error;
+      say(`${error.message}\nThe steps that need it will count as failed.\n`);
+    }
+  }
+}
+
 async function everything() {
+  await prepareMachine();
   await ledger.step("lint", lint);
   await ledger.step("types", checkTypes);
   await ledger.step("unit, interface and database tests", () => vitest([]));

@@ -3,6 +3,9 @@ import { PlainMessage, say } from "./place.mjs";
 import { run } from "./processes.mjs";
 
 const LISTS = "/var/lib/apt/lists";
+/** Wait for another apt to finish, ask nothing, and leave a settings file that is already there as it is. */
+const OPTIONS =
+  "-qq -o DPkg::Lock::Timeout=300 -o Dpkg::Use-Pty=0 -o Dpkg::Options::=--force-confdef -o Dpkg::Options::=--force-confold";
 
 /** How to act as root: directly, through a sudo that asks nothing, or not at all. */
 async function rootPrefix() {
@@ -30,17 +33,17 @@ export async function installPackages(packages, { purpose, before }) {
     );
   }
   say(`Installing ${purpose} (${packages.join(", ")}). This takes a minute or two.`);
-  const asRoot = (line) => run(prefix[0] ?? "sh", prefix.length > 0 ? [...prefix.slice(1), "sh", "-c", line] : ["-c", line]);
-  const apt = (rest) =>
-    asRoot(
-      `DEBIAN_FRONTEND=noninteractive apt-get -o DPkg::Lock::Timeout=300 -o Dpkg::Use-Pty=0 -o Dpkg::Options::=--force-confdef ` +
-        `-o Dpkg::Options::=--force-confold -qq ${rest}`,
-    );
+  const [command, ...first] = [...prefix, "sh", "-c"];
+  const asRoot = (line) => run(command, [...first, line], { stdio: "capture" });
+  const apt = (rest) => asRoot(`DEBIAN_FRONTEND=noninteractive apt-get ${OPTIONS} ${rest}`);
   if (before) await asRoot(before);
   const install = `install -y --no-install-recommends ${packages.join(" ")}`;
   const hasLists = existsSync(LISTS) && readdirSync(LISTS).some((name) => /_Packages(\.|$)/.test(name));
   if (hasLists && (await apt(install)).code === 0) return;
-  await apt("update");
-  if ((await apt(install)).code === 0) return;
-  throw new PlainMessage(`apt could not install ${purpose}; the lines above say why. By hand, as root:\n  ${byHand}`);
+  const updated = await apt("update");
+  const installed = await apt(install);
+  if (installed.code === 0) return;
+  throw new PlainMessage(
+    `apt could not install ${purpose}. It said:\n${updated.stderr}${installed.stderr}By hand, as root:\n  ${byHand}`,
+  );
 }
