@@ -1,4 +1,4 @@
-import { createWriteStream } from "node:fs";
+import { createWriteStream, rmSync } from "node:fs";
 import { join } from "node:path";
 import { createDatabase, dropDatabase } from "../db/postgres.mjs";
 import { startApplication, waitUntilReady } from "./application.mjs";
@@ -38,7 +38,10 @@ export async function tellStories(postgres, args, extra = {}) {
 
   const mailPort = await freePort();
   const mailUrl = `http://127.0.0.1:${mailPort}`;
-  const env = commonEnvironment({ ...SETTINGS, RESEND_BASE_URL: mailUrl }, database, { nodeEnv: "production", port });
+  const mailbox = join(DATA, `e2e-${port}-mailbox.jsonl`);
+  rmSync(mailbox, { force: true });
+  const settings = { ...SETTINGS, RESEND_BASE_URL: mailUrl, MAIL_FAKE_FILE: mailbox };
+  const env = commonEnvironment(settings, database, { nodeEnv: "production", port });
   await migrate(env);
   await seed(env);
 
