@@ -37,6 +37,7 @@ export default defineConfig({
           globalSetup: ["./src/testing/database.ts"],
           testTimeout: 30_000,
           hookTimeout: 60_000,
+          sequence: { groupOrder: 1 },
           maxWorkers: 2,
         },
       },
