@@ -1,3 +1,5 @@
+import { SLOT_MINUTES, SLOTS_PER_DAY } from "./slots";
+
 /**
  * The days of the demo, counted from day 1, the first on the new setup (content.md 13).
  * Where the demo is placed on the calendar is for its seeder to say; nothing here
@@ -14,9 +16,9 @@ export const DEMO_TIME_ZONE = "Europe/Oslo";
 /** A moment of the story: its day, and minutes after midnight of the wall clock there. */
 export type DemoMoment = Readonly<{ day: number; minute: number }>;
 
-/** When each version went into effect. */
+/** When each version went into effect. Version 1 is switched on in the morning of day 1; there is nothing before. */
 export const DEMO_EFFECTIVE = {
-  version1: { day: 1, minute: 0 },
+  version1: { day: 1, minute: 390 },
   version2: { day: 6, minute: 380 },
   version3: { day: 10, minute: 1230 },
   version4: { day: 19, minute: 705 },
@@ -40,4 +42,18 @@ export const DEMO_PRESSURE = { day: 29, fromMinute: 135, toMinute: 205 } as cons
 /** The bakery is closed on two days in seven. */
 export function isDemoDayOff(day: number): boolean {
   return day % 7 === 0 || day % 7 === 6;
+}
+
+/** The first slot at or after a moment, counted from midnight of day 1. */
+export function slotOfMoment({ day, minute }: DemoMoment): number {
+  return (day - 1) * SLOTS_PER_DAY + Math.ceil(minute / SLOT_MINUTES);
+}
+
+export function momentOfSlot(slot: number): DemoMoment {
+  return { day: Math.floor(slot / SLOTS_PER_DAY) + 1, minute: (slot % SLOTS_PER_DAY) * SLOT_MINUTES };
+}
+
+/** Whether the new setup is running at a slot. */
+export function hasBegun(slot: number): boolean {
+  return slot >= slotOfMoment(DEMO_EFFECTIVE.version1);
 }
