@@ -31,6 +31,7 @@ export function adjustedEffect(
   after: ReadonlyArray<InsulinDay>,
   window: AdjustedWindow,
   programmed: Readonly<{ sensitivityMgDlPerUnit: number; carbRatioGramsPerUnit: number }>,
+  isSettling = false,
 ): AdjustedEffect | null {
   const { kind, gamma0, v0, sigma0 } = ADJUSTED_CONSTANTS[window];
   const need = (d: InsulinDay) =>
@@ -51,7 +52,7 @@ export function adjustedEffect(
   const atEqualInsulin = (d: InsulinDay) => ({ day: d.day, value: d.glucoseMgDl - gamma * need(d), isUsable: true });
   const effect = estimateEffect({
     before: before.map(atEqualInsulin), after: after.map(atEqualInsulin), history: [],
-    kind, sigma0, isSettling: false, freedomSpent: FREEDOM_SPENT,
+    kind, sigma0, isSettling, freedomSpent: FREEDOM_SPENT,
   });
   if (!effect) return null;
   const rawDifference = meanOf(after.map((d) => d.glucoseMgDl)) - meanOf(before.map((d) => d.glucoseMgDl));
