@@ -14,7 +14,7 @@ import { FormProvider, type FormAction } from "./form-state";
  * words as in the summary on top.
  */
 export function ActionForm({
-  schema, action, submitLabel, start = {}, hidden = {}, extraButtons, children, onDone,
+  schema, action, submitLabel, start = {}, hidden = {}, extraButtons, idPrefix, children, onDone,
 }: Readonly<{
   schema: z.ZodType<FieldValues, FieldValues>;
   action: FormAction;
@@ -23,6 +23,8 @@ export function ActionForm({
   start?: Readonly<Record<string, string | ReadonlyArray<string>>>;
   hidden?: Readonly<Record<string, string>>;
   extraButtons?: ReactNode;
+  /** Needed where two forms with a field of the same name stand on one page. */
+  idPrefix?: string;
   children?: ReactNode;
   onDone?: (data: unknown) => void;
 }>) {
@@ -55,6 +57,7 @@ export function ActionForm({
         errorOf,
         startOf: (name) => refused?.typed[name] ?? [start[name] ?? []].flat().join("|"),
         isBusy,
+        idPrefix,
       }}
     >
       <form
@@ -72,7 +75,7 @@ export function ActionForm({
         className="mt-6 max-w-text"
       >
         {summary.length > 0 || refused ? (
-          <ErrorSummary key={`${submitCount}-${refused ? JSON.stringify(refused.fields) : ""}`} message={refused?.message} items={summary} />
+          <ErrorSummary key={`${submitCount}-${refused ? JSON.stringify(refused.fields) : ""}`} message={refused?.message} items={summary} idPrefix={idPrefix} />
         ) : null}
         {Object.entries(hidden).map(([name, value]) => <input key={name} type="hidden" {...form.register(name)} defaultValue={value} />)}
         {children}

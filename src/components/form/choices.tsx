@@ -18,25 +18,26 @@ export function TicksField(props: Group) {
 }
 
 function Choices({ name, label, hint, options, isInline, type }: Group & { type: "radio" | "checkbox" }) {
-  const { register, errorOf, startOf } = useFormContext();
+  const { register, errorOf, startOf, idPrefix } = useFormContext();
   const error = errorOf(name);
+  const id = fieldId(name, idPrefix);
   const chosen = (startOf(name) ?? "").split("|");
   return (
-    <fieldset className="mt-5" aria-describedby={hint ? `${fieldId(name)}-hint` : undefined}>
+    <fieldset className="mt-5" aria-describedby={hint ? `${id}-hint` : undefined}>
       <legend className="font-semibold">{label}</legend>
       <FieldNotes name={name} hint={hint} error={error} />
       <div className={isInline ? "flex flex-wrap gap-x-6" : ""}>
         {options.map((option, i) => (
           <div key={option.value} className="flex min-h-target items-start gap-3 py-2">
             <input
-              id={i === 0 ? fieldId(name) : `${fieldId(name)}-${option.value}`}
+              id={i === 0 ? id : `${id}-${option.value}`}
               type={type}
               value={option.value}
               defaultChecked={chosen.includes(option.value)}
               className="mt-0.5 size-6 shrink-0 accent-ink"
               {...register(name)}
             />
-            <label htmlFor={i === 0 ? fieldId(name) : `${fieldId(name)}-${option.value}`}>
+            <label htmlFor={i === 0 ? id : `${id}-${option.value}`}>
               {option.label}
               {option.hint ? <span className="block text-note text-soft">{option.hint}</span> : null}
             </label>
@@ -49,21 +50,22 @@ function Choices({ name, label, hint, options, isInline, type }: Group & { type:
 
 /** One statement to agree to. */
 export function TickField({ name, label }: Readonly<{ name: string; label: ReactNode }>) {
-  const { register, errorOf, startOf } = useFormContext();
+  const { register, errorOf, startOf, idPrefix } = useFormContext();
   const error = errorOf(name);
+  const id = fieldId(name, idPrefix);
   return (
     <div className="mt-5">
       <FieldNotes name={name} error={error} />
       <div className="flex min-h-target items-start gap-3 py-2">
         <input
-          id={fieldId(name)}
+          id={id}
           type="checkbox"
           defaultChecked={startOf(name) === "on"}
           aria-invalid={error ? true : undefined}
           className="mt-0.5 size-6 shrink-0 accent-ink"
           {...register(name)}
         />
-        <label htmlFor={fieldId(name)}>{label}</label>
+        <label htmlFor={id}>{label}</label>
       </div>
     </div>
   );

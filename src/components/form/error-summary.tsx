@@ -4,8 +4,8 @@ import { useEffect, useRef } from "react";
 
 /** "There is a problem", with a link to each field; takes the focus when it appears. */
 export function ErrorSummary({
-  message, items,
-}: Readonly<{ message?: string; items: ReadonlyArray<{ name: string; message: string }> }>) {
+  message, items, idPrefix,
+}: Readonly<{ message?: string; items: ReadonlyArray<{ name: string; message: string }>; idPrefix?: string }>) {
   const box = useRef<HTMLDivElement>(null);
   useEffect(() => {
     box.current?.focus();
@@ -24,10 +24,10 @@ export function ErrorSummary({
           <li key={name}>
             <a
               className="link font-semibold text-emergency"
-              href={`#${fieldId(name)}`}
+              href={`#${fieldId(name, idPrefix)}`}
               onClick={(event) => {
                 event.preventDefault();
-                document.getElementById(fieldId(name))?.focus();
+                document.getElementById(fieldId(name, idPrefix))?.focus();
               }}
             >
               {sentence}
@@ -39,7 +39,7 @@ export function ErrorSummary({
   );
 }
 
-/** The id of a field's element; the summary's links and labels point at it. */
-export function fieldId(name: string): string {
-  return `field-${name.replaceAll(".", "-")}`;
+/** The id of a field's element; the summary's links and labels point at it. Forms that share a page and names differ in prefix. */
+export function fieldId(name: string, prefix = "field"): string {
+  return `${prefix}-${name.replaceAll(".", "-")}`;
 }

@@ -11,16 +11,17 @@ type Common = Readonly<{
   isOptional?: boolean;
 }>;
 
-function describedBy(name: string, hint: ReactNode, error: string | undefined): string | undefined {
-  const ids = [hint ? `${fieldId(name)}-hint` : "", error ? `${fieldId(name)}-error` : ""].filter(Boolean);
+function describedBy(id: string, hint: ReactNode, error: string | undefined): string | undefined {
+  const ids = [hint ? `${id}-hint` : "", error ? `${id}-error` : ""].filter(Boolean);
   return ids.length > 0 ? ids.join(" ") : undefined;
 }
 
 function Frame({ name, label, hint, isOptional, children }: Common & { children: ReactNode }) {
-  const error = useFormContext().errorOf(name);
+  const { errorOf, idPrefix } = useFormContext();
+  const error = errorOf(name);
   return (
     <div className="mt-5">
-      <label htmlFor={fieldId(name)} className="block font-semibold">
+      <label htmlFor={fieldId(name, idPrefix)} className="block font-semibold">
         {label}
         {isOptional ? <span className="font-normal text-soft"> (optional)</span> : null}
       </label>
@@ -31,11 +32,12 @@ function Frame({ name, label, hint, isOptional, children }: Common & { children:
 }
 
 export function FieldNotes({ name, hint, error }: Readonly<{ name: string; hint?: ReactNode; error?: string }>) {
+  const id = fieldId(name, useFormContext().idPrefix);
   return (
     <>
-      {hint ? <div id={`${fieldId(name)}-hint`} className="text-note text-soft">{hint}</div> : null}
+      {hint ? <div id={`${id}-hint`} className="text-note text-soft">{hint}</div> : null}
       {error ? (
-        <p id={`${fieldId(name)}-error`} className="font-semibold text-emergency">
+        <p id={`${id}-error`} className="font-semibold text-emergency">
           <span className="sr-only">Error: </span>
           {error}
         </p>
@@ -54,20 +56,21 @@ export function TextField({
   autoComplete?: string;
   size?: number;
 }>) {
-  const { register, errorOf, startOf } = useFormContext();
+  const { register, errorOf, startOf, idPrefix } = useFormContext();
   const error = errorOf(common.name);
+  const id = fieldId(common.name, idPrefix);
   return (
     <Frame {...common} label={suffix ? `${common.label}, ${suffix}` : common.label}>
       <div className="mt-1 flex items-center gap-2">
         <input
-          id={fieldId(common.name)}
+          id={id}
           type={type}
           inputMode={inputMode}
           autoComplete={autoComplete ?? "off"}
           size={size ?? (suffix ? 8 : 34)}
           defaultValue={startOf(common.name) ?? ""}
           aria-invalid={error ? true : undefined}
-          aria-describedby={describedBy(common.name, common.hint, error)}
+          aria-describedby={describedBy(id, common.hint, error)}
           className={`field ${suffix ? "text-right" : "w-full"}`}
           {...register(common.name)}
         />
@@ -78,16 +81,17 @@ export function TextField({
 }
 
 export function TextArea({ rows = 4, ...common }: Common & Readonly<{ rows?: number }>) {
-  const { register, errorOf, startOf } = useFormContext();
+  const { register, errorOf, startOf, idPrefix } = useFormContext();
   const error = errorOf(common.name);
+  const id = fieldId(common.name, idPrefix);
   return (
     <Frame {...common}>
       <textarea
-        id={fieldId(common.name)}
+        id={id}
         rows={rows}
         defaultValue={startOf(common.name) ?? ""}
         aria-invalid={error ? true : undefined}
-        aria-describedby={describedBy(common.name, common.hint, error)}
+        aria-describedby={describedBy(id, common.hint, error)}
         className="field mt-1 block w-full"
         {...register(common.name)}
       />
@@ -98,15 +102,16 @@ export function TextArea({ rows = 4, ...common }: Common & Readonly<{ rows?: num
 export type Option = Readonly<{ value: string; label: string; hint?: string }>;
 
 export function SelectField({ options, ...common }: Common & Readonly<{ options: ReadonlyArray<Option> }>) {
-  const { register, errorOf, startOf } = useFormContext();
+  const { register, errorOf, startOf, idPrefix } = useFormContext();
   const error = errorOf(common.name);
+  const id = fieldId(common.name, idPrefix);
   return (
     <Frame {...common}>
       <select
-        id={fieldId(common.name)}
+        id={id}
         defaultValue={startOf(common.name) ?? ""}
         aria-invalid={error ? true : undefined}
-        aria-describedby={describedBy(common.name, common.hint, error)}
+        aria-describedby={describedBy(id, common.hint, error)}
         className="field mt-1 block"
         {...register(common.name)}
       >

@@ -19,6 +19,8 @@ type FormContextValue = Readonly<{
   /** What stands in the field at first: what was typed before, or the given start. */
   startOf: (name: string) => string | undefined;
   isBusy: boolean;
+  /** Begins the id of every field; see `fieldId`. */
+  idPrefix?: string;
 }>;
 
 const FormContext = createContext<FormContextValue | null>(null);
