@@ -1,4 +1,4 @@
-import { and, asc, eq, gt, isNull, or } from "drizzle-orm";
+import { and, asc, eq, gt, isNull, ne, or } from "drizzle-orm";
 import type { Db } from "@/db/client";
 import { journalGrants, journals } from "@/db/schema/journals";
 import { users } from "@/db/schema/people";
@@ -73,12 +73,26 @@ export async function upsertGrant(
     });
 }
 
-/** Ends a grant; says whether there was a live one. */
+/** Ends a helper's grant, never the person's own; says whether there was a live one. */
 export async function revokeGrant(db: Db, journalId: string, userId: string, at: Date): Promise<boolean> {
   const rows = await db
     .update(journalGrants)
     .set({ revokedAt: at })
-    .where(and(eq(journalGrants.journalId, journalId), eq(journalGrants.userId, userId), isNull(journalGrants.revokedAt)))
+    .where(and(eq(journalGrants.journalId, journalId), eq(journalGrants.userId, userId), ne(journalGrants.role, "person"), isLive(at)))
+    .returning({ userId: journalGrants.userId });
+  return rows.length > 0;
+}
+
+/** Change what a helper sees and until when; says whether there was a live grant to change. */
+export async function limitGrant(
+  db: Db,
+  grant: { journalId: string; userId: string; scopes: Scope[]; expiresAt: Date | null; now: Date },
+): Promise<boolean> {
+  const { journalId, userId, scopes, expiresAt, now } = grant;
+  const rows = await db
+    .update(journalGrants)
+    .set({ scopes, expiresAt })
+    .where(and(eq(journalGrants.journalId, journalId), eq(journalGrants.userId, userId), ne(journalGrants.role, "person"), isLive(now)))
     .returning({ userId: journalGrants.userId });
   return rows.length > 0;
 }

@@ -22,7 +22,7 @@ let worker: ChildProcess | undefined;
 afterAll(() => worker?.kill("SIGKILL"));
 
 function startWorker(appUrl: string, mailUrl: string): ChildProcess {
-  const env = { ...process.env, NODE_ENV: "test", DATABASE_URL: "", APP_DATABASE_URL: appUrl, RESEND_BASE_URL: mailUrl, RESEND_API_KEY: "local-fake", LOG_LEVEL: "error" };
+  const env = { ...process.env, NODE_ENV: "test" as const, DATABASE_URL: "", APP_DATABASE_URL: appUrl, RESEND_BASE_URL: mailUrl, RESEND_API_KEY: "local-fake", LOG_LEVEL: "error" };
   return spawn(process.execPath, ["--import", "tsx", "--import", "./src/commands/server-only.mjs", "src/worker.ts"], { env, stdio: "ignore" });
 }
 
