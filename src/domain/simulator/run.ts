@@ -7,7 +7,7 @@ import type { LoopSettings } from "./loop-settings";
 import { mealMmol, STATE } from "./model";
 import { insulinOnBoard } from "./on-board";
 import type { ModelParameters } from "./parameters";
-import { stepperOf } from "./runge-kutta";
+import { stepperOf, type Stepper } from "./runge-kutta";
 import { SENSOR_FLOOR_MMOL } from "./sensor";
 import { SLOT_MINUTES, SLOTS_PER_DAY, SLOTS_PER_HOUR } from "./slots";
 import { steadyStateAt } from "./steady-state";
@@ -36,6 +36,8 @@ export type RunOptions = Readonly<{
 const STARTS_AT_MMOL = 6.2;
 /** Blood glucose is held above this, mmol/L, so that very strong insulin cannot break the steps. */
 const LEAST_BLOOD_MMOL = 1.5;
+/** The method of Runge and Kutta stays near a decaying solution while rate times step is below 2.78. */
+const LARGEST_STEP_SHARE = 2;
 const SLOPE_SLOTS = LOOP.slopeMinutes / SLOT_MINUTES;
 const RESCUE_REST_SLOTS = PERSON.everyMinutes / SLOT_MINUTES;
 const LONG_AGO = -SLOTS_PER_DAY;
@@ -48,6 +50,16 @@ function gramsBySlot(slots: number, life: LivedDays): { eaten: Float64Array; dos
     if (doseSlot !== null) dosed[doseSlot] = (dosed[doseSlot] ?? 0) + countedGrams;
   }
   return { eaten, dosed };
+}
+
+/**
+ * Five minutes, in one step. Where insulin acts so fast that one step would run away
+ * from the solution, in as many as it takes; no ordinary dose comes near that.
+ */
+function live(step: Stepper, state: Float64Array, milliUnitsPerMinute: number, sensitivity: number, returnPerMinute: number): void {
+  const fastest = Math.max(state[STATE.transport] ?? 0, returnPerMinute + (state[STATE.disposal] ?? 0));
+  const steps = Math.max(1, Math.ceil((SLOT_MINUTES * fastest) / LARGEST_STEP_SHARE));
+  for (let i = 0; i < steps; i++) step(state, SLOT_MINUTES / steps, milliUnitsPerMinute, sensitivity);
 }
 
 /**
@@ -122,7 +134,7 @@ export function simulate(
     const delivered = Math.round((automaticRate(seen, at) * 1000) / SLOTS_PER_HOUR);
     basal[slot] = delivered;
     beyond[slot] = (given + delivered) / 1000 - at.basalUnitsPerHour / SLOTS_PER_HOUR;
-    step(state, SLOT_MINUTES, delivered / SLOT_MINUTES, life.sensitivity[slot] ?? 1);
+    live(step, state, delivered / SLOT_MINUTES, life.sensitivity[slot] ?? 1, parameters.returnPerMinute);
     if (!((state[STATE.blood] ?? 0) >= leastBloodMmol)) state[STATE.blood] = leastBloodMmol;
     if (!((state[STATE.tissue] ?? 0) >= 0)) state[STATE.tissue] = 0;
   }
