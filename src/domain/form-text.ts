@@ -88,8 +88,3 @@ export const timeOfDay = z.union([z.string(), z.number().int()]).transform((type
   }
   return minute;
 });
-
-/** Minutes after midnight as "HH:MM"; 1440 is "24:00". */
-export function clockText(minute: number): string {
-  return `${String(Math.floor(minute / 60)).padStart(2, "0")}:${String(minute % 60).padStart(2, "0")}`;
-}
