@@ -18,17 +18,23 @@ const STATUS: Record<ErrorCode, number> = {
 
 type RouteParams = { params: Promise<Record<string, string>> };
 
+/** `isLinkEnough`: the address itself is the proof, so neither cookie nor origin is looked at and nobody is signed in. */
+type RouteOptions = Readonly<{ isLinkEnough?: boolean }>;
+
 /**
  * A route handler: same lock as every other door. Bearer token or session
  * cookie (the latter with the same-origin check), RFC 9457 problems for every
  * refusal, `no-store` on every answer.
  */
-export function apiRoute(work: (ctx: Context, request: Request, params: Record<string, string>) => Promise<Response>) {
+export function apiRoute(
+  work: (ctx: Context, request: Request, params: Record<string, string>) => Promise<Response>,
+  { isLinkEnough = false }: RouteOptions = {},
+) {
   return async (request: Request, { params }: RouteParams): Promise<Response> => {
     const requestId = request.headers.get("x-request-id") ?? randomUUID();
     let response: Response;
     try {
-      const ctx = await contextOf(request, requestId);
+      const ctx = isLinkEnough ? anonymousContext(requestId) : await contextOf(request, requestId);
       response = await work(ctx, request, await params);
     } catch (error) {
       response = problem(error, requestId);
@@ -38,6 +44,10 @@ export function apiRoute(work: (ctx: Context, request: Request, params: Record<s
     response.headers.set("X-Request-Id", requestId);
     return response;
   };
+}
+
+function anonymousContext(requestId: string): Context {
+  return { actor: { type: "anonymous" }, db: pool(), now: () => new Date(), requestId };
 }
 
 async function contextOf(request: Request, requestId: string): Promise<Context> {

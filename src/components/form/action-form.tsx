@@ -14,7 +14,7 @@ import { FormProvider, type FormAction } from "./form-state";
  * words as in the summary on top.
  */
 export function ActionForm({
-  schema, action, submitLabel, start = {}, hidden = {}, extraButtons, idPrefix, children, onDone,
+  schema, action, submitLabel, start = {}, hidden = {}, extraButtons, idPrefix, submitKind, children, onDone,
 }: Readonly<{
   schema: z.ZodType<FieldValues, FieldValues>;
   action: FormAction;
@@ -25,6 +25,8 @@ export function ActionForm({
   extraButtons?: ReactNode;
   /** Needed where two forms with a field of the same name stand on one page. */
   idPrefix?: string;
+  /** "other" where sending is not the page's one next step. */
+  submitKind?: "next" | "other";
   children?: ReactNode;
   onDone?: (data: unknown) => void;
 }>) {
@@ -80,7 +82,7 @@ export function ActionForm({
         {Object.entries(hidden).map(([name, value]) => <input key={name} type="hidden" {...form.register(name)} defaultValue={value} />)}
         {children}
         <div className="mt-6 flex flex-wrap gap-3">
-          <Button isBusy={isBusy}>{isBusy ? "Saving …" : submitLabel}</Button>
+          <Button kind={submitKind} isBusy={isBusy}>{isBusy ? "Saving …" : submitLabel}</Button>
           {extraButtons}
         </div>
       </form>

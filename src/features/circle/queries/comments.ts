@@ -1,9 +1,11 @@
 import "server-only";
 import { z } from "zod";
-import { findReadUpTo, listLatestComments, listThread, type CommentRow } from "@/db/repositories/comments";
-import { READ_ACTION_OF_SUBJECT, readableSubjects, type CommentSubject } from "@/domain/access/comment-subject";
+import { findReadUpTo, listLatestComments, listOpenQuestions, listThread, type CommentRow } from "@/db/repositories/comments";
+import { findJournal } from "@/db/repositories/journals";
+import { COMMENT_SUBJECTS, READ_ACTION_OF_SUBJECT, readableSubjects, type CommentSubject } from "@/domain/access/comment-subject";
 import { subjectText } from "@/domain/access/comment-place";
 import { authorize, requireUser, type JournalRole } from "@/domain/access/policy";
+import { momentText } from "@/domain/digest/date-text";
 import { recordRead } from "@/lib/access";
 import type { Context } from "@/lib/context";
 import { threadInput, type ThreadInput } from "../schema";
@@ -22,7 +24,11 @@ export type Comment = Readonly<{
   isOwn: boolean;
   /** By somebody else, since the reader last marked this journal's comments as read. */
   isUnread: boolean;
+  /** A question that nobody but its author has answered. */
+  isOpen: boolean;
   createdAt: Date;
+  /** The same on the journal's clock, in words. */
+  when: string;
 }>;
 
 /**
@@ -36,8 +42,7 @@ export async function listComments(ctx: Context, input: ThreadInput): Promise<Co
   authorize(ctx.actor, READ_ACTION_OF_SUBJECT[subject], journalId);
   const { userId } = requireUser(ctx.actor);
   await recordRead(ctx, journalId, `comments on ${subjectText(subject, subjectKey)}`);
-  const readUpTo = await findReadUpTo(ctx.db, journalId, userId);
-  return (await listThread(ctx.db, journalId, subject, subjectKey)).map((row) => shown(row, userId, readUpTo));
+  return shown(ctx, journalId, userId, await listThread(ctx.db, journalId, subject, subjectKey));
 }
 
 /** The latest comments on everything the reader may see in a journal, newest first. */
@@ -46,12 +51,17 @@ export async function latestComments(ctx: Context, input: { journalId: string })
   authorize(ctx.actor, "comment.read", journalId);
   const { userId } = requireUser(ctx.actor);
   await recordRead(ctx, journalId, "all comments");
-  const readUpTo = await findReadUpTo(ctx.db, journalId, userId);
-  const rows = await listLatestComments(ctx.db, journalId, readableSubjects(ctx.actor, journalId), LATEST_AT_MOST);
-  return rows.map((row) => shown(row, userId, readUpTo));
+  const subjects = readableSubjects(ctx.actor, journalId);
+  return shown(ctx, journalId, userId, await listLatestComments(ctx.db, journalId, subjects, LATEST_AT_MOST));
 }
 
-function shown({ authorId, ...row }: CommentRow, readerId: string, readUpTo: Date | null): Comment {
-  const isOwn = authorId === readerId;
-  return { ...row, isOwn, isUnread: !isOwn && (readUpTo === null || row.createdAt > readUpTo) };
+async function shown(ctx: Context, journalId: string, readerId: string, rows: ReadonlyArray<CommentRow>): Promise<Comment[]> {
+  const journal = await findJournal(ctx.db, journalId);
+  const readUpTo = await findReadUpTo(ctx.db, journalId, readerId);
+  const open = new Set((await listOpenQuestions(ctx.db, journalId, COMMENT_SUBJECTS, ctx.now())).map(({ id }) => id));
+  return rows.map(({ authorId, ...row }) => {
+    const isOwn = authorId === readerId;
+    const isUnread = !isOwn && (readUpTo === null || row.createdAt > readUpTo);
+    return { ...row, isOwn, isUnread, isOpen: open.has(row.id), when: momentText(row.createdAt, journal?.timeZone ?? "UTC") };
+  });
 }

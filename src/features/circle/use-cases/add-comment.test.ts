@@ -150,9 +150,21 @@ describe("comments", () => {
     await addComment(await contextFor(db, mentorId, at(2)), say(journalId, { body: "Was it at the same hour?", inReplyTo: commentId }));
     const thread = await listComments(await contextFor(db, mentorId, at(3)), { journalId, subject: "version", subjectKey: "1" });
     expect(thread).toMatchObject([
-      { body: evil, kind: "question", authorRole: "person", isOwn: false, isUnread: true },
+      { body: evil, kind: "question", isOpen: false, when: "Tuesday 10 March, 10:01", authorRole: "person", isOwn: false, isUnread: true },
       { body: "Was it at the same hour?", inReplyTo: commentId, authorName: "A mentor", authorRole: "mentor", isOwn: true, isUnread: false },
     ]);
     expect(await db.select().from(accessLog).where(eq(accessLog.journalId, journalId))).toMatchObject([{ userId: mentorId, what: "comments on version 1" }]);
+  });
+
+  it("that ask stay open until somebody else answers", async () => {
+    const journal = await journalWithVersion();
+    const { journalId, ownerId } = journal;
+    const mentor = await contextFor(db, await createHelper(db, { ...journal, role: "mentor" }));
+    const { commentId } = await addComment(mentor, say(journalId, { kind: "question" }));
+    const isOpen = async () => (await latestComments(mentor, { journalId })).find(({ id }) => id === commentId)?.isOpen;
+    await addComment(mentor, say(journalId, { body: "I mean the night.", inReplyTo: commentId }));
+    expect(await isOpen()).toBe(true);
+    await addComment(await contextFor(db, ownerId), say(journalId, { body: "Calmer mornings.", inReplyTo: commentId }));
+    expect(await isOpen()).toBe(false);
   });
 });

@@ -10,7 +10,7 @@ import { unsubscribeToken } from "@/lib/secrets";
 import { anonymousContext, contextFor, createHelper, createJournal, createPerson } from "@/testing/factories";
 import { createTestDb } from "@/testing/test-database";
 import { composeDigest } from "../queries/digest";
-import { digestPreference } from "../queries/digest-preference";
+import { digestPreview } from "../queries/digest-preview";
 import { saveDigestPreference } from "./save-digest-preference";
 import { sendDigestNow } from "./send-digest-now";
 import { unsubscribe } from "./unsubscribe";
@@ -28,10 +28,10 @@ describe("choices about weekly mail", () => {
     it("keeps the choice of the one who made it", async () => {
       const userId = await createPerson(db);
       const ctx = await contextFor(db, userId);
-      expect(await digestPreference(ctx)).toEqual(DEFAULT_DIGEST_PREFERENCE);
+      expect(await digestPreview(ctx, noFinding)).toMatchObject({ preference: DEFAULT_DIGEST_PREFERENCE, timeZone: "Europe/Oslo", digest: null });
       await saveDigestPreference(ctx, form);
       await saveDigestPreference(ctx, { ...form, isToldOfComments: "" });
-      expect(await digestPreference(ctx)).toEqual({ level: "summary", weekday: 7, minuteOfDay: 1110, isToldOfComments: false });
+      expect((await digestPreview(ctx, noFinding)).preference).toEqual({ level: "summary", weekday: 7, minuteOfDay: 1110, isToldOfComments: false });
     });
 
     it.each([
@@ -46,7 +46,7 @@ describe("choices about weekly mail", () => {
 
     it("asks for a signed-in, verified account", async () => {
       await expect(saveDigestPreference(anonymousContext(db), form)).rejects.toMatchObject({ code: "UNAUTHENTICATED" });
-      await expect(digestPreference(anonymousContext(db))).rejects.toMatchObject({ code: "UNAUTHENTICATED" });
+      await expect(digestPreview(anonymousContext(db), noFinding)).rejects.toMatchObject({ code: "UNAUTHENTICATED" });
       const unverified = await createPerson(db, { isVerified: false });
       await expect(saveDigestPreference(await contextFor(db, unverified), form)).rejects.toMatchObject({ code: "FORBIDDEN" });
     });
