@@ -25,7 +25,7 @@ const week = (given: Partial<JournalWeek> = {}): JournalWeek => ({
 });
 
 const data = (level: DigestData["level"], ...journals: JournalWeek[]): DigestData => ({
-  level, from: "2026-03-09", to: "2026-03-15", today: "2026-03-16", journals,
+  level, unit: "mg/dL", from: "2026-03-09", to: "2026-03-15", today: "2026-03-16", journals,
 });
 
 const build = (level: DigestData["level"], ...journals: JournalWeek[]): Digest => {
@@ -65,9 +65,9 @@ describe("buildDigest", () => {
 
   it("adds values and figures at full", () => {
     const lines = linesOf(build("full", week()));
-    expect(lines).toContain("Version 3 (basal rate) went into effect on Monday 9 March: basal rate 00:00 to 04:00, 0.50 U/h → 0.55 U/h.");
+    expect(lines).toContain("Version 3 (basal rate) went into effect on Monday 9 March: Basal 00:00–04:00: 0.50 U/h → 0.55 U/h (10% stronger).");
     expect(lines).toContain(FINDING);
-    expect(lines).toContain("In these 7 days 68% of readings were in range, 70 to 180 mg/dL (3.9 to 10.0 mmol/L), and 2.1% below 70 (3.9).");
+    expect(lines).toContain("In these 7 days 68% of readings were in range, 70 (3.9) to 180 (10.0) mg/dL, and 2.1% below 70 (3.9).");
   });
 
   it("says no figure that too few readings carry", () => {

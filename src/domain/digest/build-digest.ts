@@ -6,15 +6,16 @@ import type { Digest, DigestData, DigestSection, JournalWeek } from "./week";
 const DAYS_IN_SPAN = 7;
 
 /** One's own notebook, or one that was shared with a mentor or a family helper. */
-function notebookSection(week: JournalWeek, { level, today }: DigestData, isOnly: boolean): DigestSection {
+function notebookSection(week: JournalWeek, data: DigestData, isOnly: boolean): DigestSection {
+  const { level, unit, today } = data;
   const isOwn = week.role === "person";
   const followUps = week.followUps.map((one) => followUpLine(one, today));
   return {
     heading: isOwn ? (isOnly ? "Your notebook" : week.name) : `${week.ownerName}’s notebook`,
     parts: [
-      ...changesPart(week, level),
+      ...changesPart(week, level, unit),
       ...findingsPart(week, level),
-      ...(isOwn ? dataPart(week, level, DAYS_IN_SPAN) : []),
+      ...(isOwn ? dataPart(week, data, DAYS_IN_SPAN) : []),
       ...openPart("Open questions", questionLines(week), level, "question waits for an answer", "questions wait for an answer"),
       ...(isOwn ? openPart("Follow-ups", followUps, level, "follow-up in the days to come", "follow-ups in the days to come") : []),
     ],

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { dateText, isoDateOf, longDateText, momentText } from "./date-text";
+import { dateText, longDateText, momentText } from "./date-text";
 
 describe("dates in words", () => {
   it("names a date without and with its year", () => {
@@ -9,8 +9,6 @@ describe("dates in words", () => {
 
   it("reads an instant on the clock of its zone", () => {
     const at = new Date("2026-03-09T23:05:00Z");
-    expect(isoDateOf(at, "Europe/Oslo")).toBe("2026-03-10");
-    expect(isoDateOf(at, "America/St_Johns")).toBe("2026-03-09");
     expect(momentText(at, "Europe/Oslo")).toBe("Tuesday 10 March, 00:05");
     expect(momentText(at, "UTC")).toBe("Monday 9 March, 23:05");
   });

@@ -1,3 +1,5 @@
+import { isoDayOf } from "@/domain/iso-day";
+
 const WORDS = new Intl.DateTimeFormat("en-GB", { weekday: "long", day: "numeric", month: "long", timeZone: "UTC" });
 
 function parts(format: Intl.DateTimeFormat, atMs: number): Record<string, string> {
@@ -16,20 +18,11 @@ export function longDateText(isoDate: string): string {
   return `${day} ${month} ${isoDate.slice(0, 4)}`;
 }
 
-/** The civil date of an instant in a zone, as an ISO date. */
-export function isoDateOf(at: Date, zone: string): string {
-  const { year, month, day } = parts(
-    new Intl.DateTimeFormat("en-GB", { year: "numeric", month: "2-digit", day: "2-digit", timeZone: zone }),
-    at.getTime(),
-  );
-  return `${year}-${month}-${day}`;
-}
-
 /** An instant on the clock of a zone: "Monday 9 March, 08:05". */
 export function momentText(at: Date, zone: string): string {
   const { hour, minute } = parts(
     new Intl.DateTimeFormat("en-GB", { hour: "2-digit", minute: "2-digit", hourCycle: "h23", timeZone: zone }),
     at.getTime(),
   );
-  return `${dateText(isoDateOf(at, zone))}, ${hour}:${minute}`;
+  return `${dateText(isoDayOf(at, zone))}, ${hour}:${minute}`;
 }

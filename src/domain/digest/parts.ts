@@ -1,4 +1,5 @@
-import { mgDlToMmol } from "@/domain/units";
+import { thresholdText } from "@/domain/glucose-text";
+import type { GlucoseUnit } from "@/domain/units";
 import { dateText } from "./date-text";
 import { versionLine } from "./version-line";
 import type { DigestData, DigestPart, FollowUp, GlucoseShares, JournalWeek } from "./week";
@@ -8,8 +9,6 @@ type Level = DigestData["level"];
 /** Readings have to cover this share of the days before a figure is said (metrics.md, consensus of 70 %). */
 export const COVERED_FRACTION_AT_LEAST = 0.7;
 
-const LOW_MG_DL = 70;
-const HIGH_MG_DL = 180;
 const QUIET = "No changes this week. That is a good way to learn something.";
 
 /** "1 change", "2 changes". */
@@ -18,14 +17,13 @@ export function counted(count: number, one: string, many: string): string {
 }
 
 const percent = (fraction: number, decimals: number) => `${(fraction * 100).toFixed(decimals)}%`;
-const mmol = (mgDl: number) => mgDlToMmol(mgDl).toFixed(1);
 
 /** Up to the first full stop that ends a sentence; "70 (3.9)" does not. */
 export function firstSentence(text: string): string {
   return /^.*?[.?](?=\s|$)/s.exec(text)?.[0] ?? text;
 }
 
-export function changesPart(week: JournalWeek, level: Level): DigestPart[] {
+export function changesPart(week: JournalWeek, level: Level, unit: GlucoseUnit): DigestPart[] {
   if (week.versions === null) return [];
   const title = week.role === "person" ? "What changed" : week.lookedOn ? "What changed since you looked" : "What changed";
   const since = week.lookedOn ? [`You looked last on ${dateText(week.lookedOn)}.`] : [];
@@ -33,7 +31,7 @@ export function changesPart(week: JournalWeek, level: Level): DigestPart[] {
     return [{ title, lines: week.lookedOn ? [...since, "Nothing has changed since."] : [QUIET] }];
   }
   const count = [`${counted(week.versions.length, "change or proposal", "changes and proposals")}.`];
-  const told = level === "links" ? count : week.versions.map((version) => versionLine(version, level));
+  const told = level === "links" ? count : week.versions.map((version) => versionLine(version, level, unit));
   return [{ title, lines: [...since, ...told] }];
 }
 
@@ -42,18 +40,18 @@ export function findingsPart(week: JournalWeek, level: Level): DigestPart[] {
   return [{ title: "What followed", lines: week.findings.map(({ text }) => (level === "full" ? text : firstSentence(text))) }];
 }
 
-function sharesLine({ days, inRangeFraction, belowFraction, coveredFraction }: GlucoseShares): string {
+function sharesLine({ days, inRangeFraction, belowFraction, coveredFraction }: GlucoseShares, unit: GlucoseUnit): string {
   if (coveredFraction < COVERED_FRACTION_AT_LEAST) {
     return `Readings cover ${percent(coveredFraction, 0)} of these ${days} days, too little to say figures.`;
   }
-  const range = `${LOW_MG_DL} to ${HIGH_MG_DL} mg/dL (${mmol(LOW_MG_DL)} to ${mmol(HIGH_MG_DL)} mmol/L)`;
-  return `In these ${days} days ${percent(inRangeFraction, 0)} of readings were in range, ${range}, and ${percent(belowFraction, 1)} below ${LOW_MG_DL} (${mmol(LOW_MG_DL)}).`;
+  const low = thresholdText(70, unit);
+  return `In these ${days} days ${percent(inRangeFraction, 0)} of readings were in range, ${low} to ${thresholdText(180, unit)} ${unit}, and ${percent(belowFraction, 1)} below ${low}.`;
 }
 
-export function dataPart(week: JournalWeek, level: Level, daysInSpan: number): DigestPart[] {
+export function dataPart(week: JournalWeek, { level, unit }: DigestData, daysInSpan: number): DigestPart[] {
   const glucose = week.glucoseDays === null ? [] : [`Glucose on ${week.glucoseDays} of ${daysInSpan} days.`];
   const logged = week.loggedDays === null ? [] : [`Something logged on ${week.loggedDays} of ${daysInSpan} days.`];
-  const shares = level === "full" && week.week ? [sharesLine(week.week)] : [];
+  const shares = level === "full" && week.week ? [sharesLine(week.week, unit)] : [];
   const lines = [...glucose, ...logged, ...shares];
   return lines.length > 0 ? [{ title: "Days with data", lines }] : [];
 }

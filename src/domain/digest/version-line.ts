@@ -1,7 +1,8 @@
 import type { VersionState } from "@/domain/journal/version-lifecycle";
+import { changeText } from "@/domain/settings/difference-text";
 import { FAMILY_FACTS } from "@/domain/settings/family";
+import type { GlucoseUnit } from "@/domain/units";
 import type { DigestLevel } from "./basis";
-import { changeText } from "./change-text";
 import { dateText } from "./date-text";
 import type { VersionNews } from "./version-news";
 
@@ -35,10 +36,10 @@ function happened({ state, on, until }: VersionNews): string {
  *
  * @returns for example "Version 3 (basal rate) went into effect on Monday 9 March."
  */
-export function versionLine(news: VersionNews, level: DigestLevel): string {
+export function versionLine(news: VersionNews, level: DigestLevel, unit: GlucoseUnit): string {
   const sentence = `${nameOf(news)} ${happened(news)}`;
   if (level !== "full" || news.changes.length === 0) return `${sentence}.`;
-  const told = news.changes.slice(0, CHANGES_AT_MOST).map(changeText).join("; ");
+  const told = news.changes.slice(0, CHANGES_AT_MOST).map((change) => changeText(change, unit)).join("; ");
   const rest = news.changes.length - CHANGES_AT_MOST;
   return `${sentence}: ${told}${rest > 0 ? `; and ${rest} more` : ""}.`;
 }

@@ -43,7 +43,7 @@ describe("versionLine", () => {
   const line = (given: Partial<VersionFacts> & { number: number }, level: "summary" | "full" = "summary") => {
     const [news] = versionNews([facts({ number: 1 }), facts({ stateSince: tuesday, ...given })], SPAN, "UTC").slice(-1);
     if (!news) throw new Error("no news");
-    return versionLine(news, level);
+    return versionLine(news, level, "mg/dL");
   };
 
   it.each([
@@ -56,7 +56,7 @@ describe("versionLine", () => {
 
   it("says old and new values at full only", () => {
     const given = { number: 2, profile: profile(550), effectiveFrom: tuesday };
-    expect(line(given, "full")).toContain(": basal rate, 0.50 U/h → 0.55 U/h.");
+    expect(line(given, "full")).toContain(": Basal: 0.50 U/h → 0.55 U/h (10% stronger).");
     expect(line(given)).not.toContain("0.5");
   });
 });

@@ -2,7 +2,7 @@ import type { VersionState } from "@/domain/journal/version-lifecycle";
 import { profileDifference, type SettingChange } from "@/domain/settings/difference";
 import type { SettingFamily } from "@/domain/settings/family";
 import type { SettingsProfile } from "@/domain/settings/profile";
-import { isoDateOf } from "./date-text";
+import { isoDayOf } from "@/domain/iso-day";
 
 /** What has to be known of a version to tell its news. */
 export type VersionFacts = Readonly<{
@@ -48,8 +48,8 @@ export function versionNews(versions: ReadonlyArray<VersionFacts>, span: Readonl
       if (on === null) return [];
       const parent = versions.find(({ number }) => number === version.parentNumber);
       const { changes, families } = parent ? profileDifference(parent.profile, version.profile) : { changes: [], families: [] };
-      const until = version.effectiveUntil ? isoDateOf(version.effectiveUntil, zone) : null;
-      return [{ number: version.number, kind: version.kind, state: version.state, families, changes, on: isoDateOf(on, zone), until }];
+      const until = version.effectiveUntil ? isoDayOf(version.effectiveUntil, zone) : null;
+      return [{ number: version.number, kind: version.kind, state: version.state, families, changes, on: isoDayOf(on, zone), until }];
     })
     .toSorted((a, b) => a.number - b.number);
 }

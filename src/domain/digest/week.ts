@@ -1,4 +1,5 @@
 import type { JournalRole } from "@/domain/access/policy";
+import type { GlucoseUnit } from "@/domain/units";
 import type { DigestLevel } from "./basis";
 import type { VersionNews } from "./version-news";
 
@@ -36,6 +37,8 @@ export type JournalWeek = Readonly<{
 
 export type DigestData = Readonly<{
   level: Exclude<DigestLevel, "off">;
+  /** The reader's own. */
+  unit: GlucoseUnit;
   /** The seven civil days it is about, as ISO dates. */
   from: string;
   to: string;

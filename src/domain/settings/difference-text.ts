@@ -3,6 +3,9 @@ import { clockText } from "./clock-text";
 import type { ProfileDifference, SettingChange } from "./difference";
 import { sensitivityIn } from "./sensitivity-unit";
 
+/** A rate with two decimals, or three where the device's step needs them: a rate is never shown rounded. */
+const rate = (milliUnitsPerHour: number) => (milliUnitsPerHour / 1000).toFixed(milliUnitsPerHour % 10 === 0 ? 2 : 3);
+
 const trimmed = (value: number, places: number) => String(Number(value.toFixed(places)));
 
 /** A stored setting value as people write it, with its unit. */
@@ -12,9 +15,9 @@ export function settingValueText(change: Pick<SettingChange, "field" | "family">
   switch (change.field) {
     case "milliUnitsPerHour":
     case "maxBasalMilliUnitsPerHour":
-      return `${(value / 1000).toFixed(2)} U/h`;
+      return `${rate(value)} U/h`;
     case "milligramsPerUnit":
-      return `${trimmed(value / 1000, 1)} g/U`;
+      return `${trimmed(value / 1000, 3)} g/U`;
     case "microMgDlPerUnit":
       return `${trimmed(sensitivityIn(value, unit), unit === "mg/dL" ? 0 : 1)} ${unit} per U`;
     case "lowMgDl":
@@ -24,7 +27,7 @@ export function settingValueText(change: Pick<SettingChange, "field" | "family">
       return `${trimmed(value / 60, 2)} h`;
     case "maxBolusMilliUnits":
     case "maxInsulinOnBoardMilliUnits":
-      return `${trimmed(value / 1000, 2)} U`;
+      return `${trimmed(value / 1000, 3)} U`;
     default:
       return String(value);
   }

@@ -1,4 +1,5 @@
-import { isoDateOf, longDateText } from "@/domain/digest/date-text";
+import { longDateText } from "@/domain/digest/date-text";
+import { isoDayOf } from "@/domain/iso-day";
 import { acceptInvitationAction } from "../actions";
 import { ROLE_WORDS } from "../constants";
 import type { ShownInvitation } from "../queries/invitation";
@@ -8,7 +9,7 @@ import { PressForm } from "./press-form";
 /** What an invitation offers: by whom, as what, to see what, until when. */
 export function InvitationTerms({ invitation }: Readonly<{ invitation: ShownInvitation }>) {
   const { inviterName, role, scopes, email, expiresAt, grantExpiresAt } = invitation;
-  const day = (at: Date) => longDateText(isoDateOf(at, "UTC"));
+  const day = (at: Date) => longDateText(isoDayOf(at, "UTC"));
   return (
     <dl className="mt-4 max-w-text">
       {[

@@ -4,7 +4,7 @@ import { listCircle } from "@/db/repositories/grants";
 import { listOpenInvitations } from "@/db/repositories/invitations";
 import { findJournal } from "@/db/repositories/journals";
 import { authorize, type JournalRole, type Scope } from "@/domain/access/policy";
-import { isoDateOf } from "@/domain/digest/date-text";
+import { isoDayOf } from "@/domain/iso-day";
 import { AppError } from "@/domain/errors";
 import type { Context } from "@/lib/context";
 
@@ -37,7 +37,7 @@ export async function circle(
   authorize(ctx.actor, "circle.read", journalId);
   const journal = await findJournal(ctx.db, journalId);
   if (!journal) throw new AppError("NOT_FOUND", `journal ${journalId}`);
-  const dateOf = (at: Date) => isoDateOf(at, journal.timeZone);
+  const dateOf = (at: Date) => isoDayOf(at, journal.timeZone);
   const lastDay = (end: Date | null) => (end ? dateOf(new Date(end.getTime() - 1)) : null);
   const grants = await listCircle(ctx.db, journalId, ctx.now());
   const invitations = await listOpenInvitations(ctx.db, journalId, ctx.now());

@@ -32,7 +32,7 @@ describe("helpers", () => {
   describe("limitHelper", () => {
     it("counts from the next request on", async () => {
       const { journalId, ownerId, mentorId } = await withMentor();
-      await limitHelper(await contextFor(db, ownerId), { journalId, userId: mentorId, scopes: "glucose" as never, until: "2026-03-10" });
+      await limitHelper(await contextFor(db, ownerId), { journalId, userId: mentorId, scopes: "glucose", until: "2026-03-10" });
       expect(await listLiveGrants(db, mentorId, TEST_NOW)).toEqual([{ journalId, role: "mentor", scopes: ["glucose"] }]);
       expect(await listLiveGrants(db, mentorId, new Date("2026-03-10T23:00:00Z"))).toEqual([]);
       expect((await circle(await contextFor(db, ownerId), { journalId })).helpers).toMatchObject([{ scopes: ["glucose"], until: "2026-03-10" }]);

@@ -2,7 +2,7 @@ import "server-only";
 import { findAccount } from "@/db/repositories/accounts";
 import { findDigestPreference } from "@/db/repositories/digest-preferences";
 import { authorize, requireUser } from "@/domain/access/policy";
-import { isoDateOf } from "@/domain/digest/date-text";
+import { isoDayOf } from "@/domain/iso-day";
 import type { DigestPreference } from "@/domain/digest/preference";
 import type { Digest, FindingOf } from "@/domain/digest/week";
 import type { Context } from "@/lib/context";
@@ -17,6 +17,6 @@ export async function digestPreview(
   const { userId } = requireUser(ctx.actor);
   const timeZone = (await findAccount(ctx.db, userId))?.timeZone ?? "UTC";
   const preference = await findDigestPreference(ctx.db, userId);
-  const composed = await composeDigest(ctx, { userId, today: isoDateOf(ctx.now(), timeZone) }, findingOf);
+  const composed = await composeDigest(ctx, { userId, today: isoDayOf(ctx.now(), timeZone) }, findingOf);
   return { preference, digest: composed?.digest ?? null, timeZone };
 }

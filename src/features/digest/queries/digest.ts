@@ -45,6 +45,6 @@ export async function composeDigest(
     if (week) weeks.push(week);
   }
   const journals = weeks.toSorted((a, b) => a.ownerName.localeCompare(b.ownerName) || a.name.localeCompare(b.name));
-  const digest = buildDigest({ level, ...span, journals });
+  const digest = buildDigest({ level, unit: account.glucoseUnit, ...span, journals });
   return digest && { digest, basis: { level, grants: reader.grants }, toAddress: account.email, displayName: account.displayName };
 }

@@ -9,7 +9,7 @@ import { subjectText } from "@/domain/access/comment-place";
 import { readableSubjects } from "@/domain/access/comment-subject";
 import { authorize, can, type Action, type Actor, type Grant } from "@/domain/access/policy";
 import { dayNumberOf, dayStart } from "@/domain/day-start";
-import { isoDateOf } from "@/domain/digest/date-text";
+import { isoDayOf } from "@/domain/iso-day";
 import { followUpsOf } from "@/domain/digest/follow-ups";
 import { versionNews } from "@/domain/digest/version-news";
 import type { FindingOf, GlucoseShares, JournalWeek } from "@/domain/digest/week";
@@ -58,7 +58,7 @@ export async function journalWeek(ctx: Context, input: WeekInput, findingOf: Fin
     name: journal.name,
     ownerName: owner.displayName,
     role,
-    lookedOn: look ? isoDateOf(look, zone) : null,
+    lookedOn: look ? isoDayOf(look, zone) : null,
     versions: versions && versionNews(versions, look ? { from: look, until: ctx.now() } : span, zone),
     findings: await findingsOf(journalId, told, findingOf),
     glucoseDays: glucose ? (await addUpGlucoseDays(ctx.db, journalId, dayNumberOf(from), dayNumberOf(to))).days : null,
@@ -72,7 +72,7 @@ export async function journalWeek(ctx: Context, input: WeekInput, findingOf: Fin
       .map(({ authorName, subject, subjectKey }) => ({ askedBy: authorName, about: subjectText(subject, subjectKey) })),
     waiting: (versions ?? [])
       .filter(({ state }) => state === "proposed")
-      .map(({ number, stateSince }) => ({ versionNumber: number, since: isoDateOf(stateSince, zone) }))
+      .map(({ number, stateSince }) => ({ versionNumber: number, since: isoDayOf(stateSince, zone) }))
       .toSorted((a, b) => a.since.localeCompare(b.since)),
     followUps: followUpsOf(versions ?? [], today),
   };

@@ -3,7 +3,7 @@ import { randomUUID } from "node:crypto";
 import { findAccount } from "@/db/repositories/accounts";
 import { insertMail } from "@/db/repositories/outbox";
 import { authorize, requireUser } from "@/domain/access/policy";
-import { isoDateOf } from "@/domain/digest/date-text";
+import { isoDayOf } from "@/domain/iso-day";
 import type { FindingOf } from "@/domain/digest/week";
 import { AppError } from "@/domain/errors";
 import type { Context } from "@/lib/context";
@@ -21,7 +21,7 @@ export async function sendDigestNow(ctx: Context, findingOf: FindingOf): Promise
   const { userId } = requireUser(ctx.actor);
   await countAttempt(ctx.db, "digest", userId);
   const account = await findAccount(ctx.db, userId);
-  const today = isoDateOf(ctx.now(), account?.timeZone ?? "UTC");
+  const today = isoDayOf(ctx.now(), account?.timeZone ?? "UTC");
   const composed = await composeDigest(ctx, { userId, today }, findingOf);
   if (!composed) throw new AppError("CONFLICT", "no digest to send");
 
