@@ -1,7 +1,5 @@
 import { Temporal } from "@js-temporal/polyfill";
 
-
-
 /** The civil date of a day number. */
 export function isoDayOfNumber(dayNumber: number): string {
   return new Date(dayNumber * 86_400_000).toISOString().slice(0, 10);

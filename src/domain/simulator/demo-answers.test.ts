@@ -2,11 +2,10 @@ import { describe, expect, it } from "vitest";
 import { compare, type Comparison } from "@/domain/comparison/compare";
 import type { DayValue } from "@/domain/comparison/day-value";
 import { governedParts } from "@/domain/comparison/governed-parts";
-import type { OutcomeId } from "@/domain/comparison/outcomes";
 import { primaryOutcome } from "@/domain/comparison/outcomes";
 import { daysLeftOut } from "@/domain/journal/day-flag";
 import { profileDifference } from "@/domain/settings/difference";
-import { DEMO_DAYS, DEMO_EFFECTIVE } from "./demo-calendar";
+import { DEMO_DAYS, DEMO_EFFECTIVE, DEMO_PRESSURE, hasBegun, momentOfSlot } from "./demo-calendar";
 import { DEMO_FLAGS } from "./demo-diary";
 import { demoSeries } from "./demo-series";
 import { DEMO_VERSIONS, type DemoVersion } from "./demo-versions";
@@ -15,8 +14,19 @@ import { outcomeSeries } from "./outcome-series";
 const inEffect = DEMO_VERSIONS.filter(({ effectiveFrom }) => effectiveFrom !== null);
 const versionOf = (number: number) => inEffect.find((version) => version.number === number)!;
 const { run, meals } = demoSeries();
-const shown = { ...run, glucoseMgDl: run.glucoseMgDl.map((value) => Math.min(400, Math.round(value))) };
-const leftOut = new Set([...DEMO_FLAGS.flatMap(daysLeftOut), 1, DEMO_FLAGS.find(({ code }) => code === "pressure-low")!.firstDay]);
+const pressureDay = DEMO_FLAGS.find(({ code }) => code === "pressure-low")!.firstDay;
+
+/** What the sensor showed since the start, without the night it lay under. */
+const shown = {
+  ...run,
+  glucoseMgDl: run.glucoseMgDl.map((value, slot) => {
+    const { day, minute } = momentOfSlot(slot);
+    const isPressed = day === pressureDay && minute >= DEMO_PRESSURE.fromMinute && minute < DEMO_PRESSURE.toMinute;
+    return hasBegun(slot) && !isPressed ? Math.min(400, Math.round(value)) : NaN;
+  }),
+};
+const seriesFrom = (dayOne: number) =>
+  outcomeSeries(shown, meals, dayOne, new Map(DEMO_FLAGS.flatMap((flag) => daysLeftOut(flag).map((day) => [dayOne + day - 1, flag.code]))));
 const ALL_PARTS = ["night", "breakfast", "lunch", "dinner", "corrections"] as const;
 
 function changed(version: DemoVersion) {
@@ -29,9 +39,7 @@ function comparisonOf(number: number, dayOne: number, hasInsulinLog: boolean): C
   const before = versionOf(number - 1);
   const next = inEffect.find((later) => later.number === number + 1);
   const placed = (day: number) => dayOne + day - 1;
-  const all = outcomeSeries(shown, meals, dayOne);
-  const flagged = (values: DayValue[]) => values.map((value) => ({ ...value, isUsable: !leftOut.has(value.day - dayOne + 1) }));
-  const series = Object.fromEntries(Object.entries(all.series).map(([id, values]) => [id, flagged(values)])) as Record<OutcomeId, DayValue[]>;
+  const all = seriesFrom(dayOne);
   return compare({
     version: number, against: number - 1,
     changeDay: placed(version.effectiveFrom!.day),
@@ -44,8 +52,8 @@ function comparisonOf(number: number, dayOne: number, hasInsulinLog: boolean): C
       day: placed(earlier.effectiveFrom!.day), parts: earlier.number === 1 ? ALL_PARTS : governedParts(changed(earlier)),
     })),
     systemStartDay: dayOne,
-    series,
-    below54Percent: flagged(all.below54Percent),
+    series: all.series,
+    below54Percent: all.below54Percent,
     insulin: hasInsulinLog ? all.insulin : { night: [], day: [] },
     programmed: {
       sensitivityMgDlPerUnit: before.profile.sensitivity[0]!.microMgDlPerUnit / 1e6,
@@ -81,9 +89,9 @@ describe.each(DAYS_ONE)("the demo's answers, day 1 on day number %s", (dayOne) =
 });
 
 describe("the level of lows in the demo", () => {
-  const { below54Percent, series } = outcomeSeries(shown, meals, 1);
-  const percentOver = (values: DayValue[], from: number, to: number) => {
-    const days = values.filter(({ day }) => day >= from && day <= to && !leftOut.has(day));
+  const { below54Percent, series } = seriesFrom(1);
+  const percentOver = (values: ReadonlyArray<DayValue>, from: number, to: number) => {
+    const days = values.filter(({ day, isUsable }) => day >= from && day <= to && isUsable);
     return days.reduce((sum, { value }) => sum + value, 0) / days.length;
   };
 

@@ -33,6 +33,7 @@ export type RunOptions = Readonly<{
   bolusStepMilliUnits?: number;
 }>;
 
+const { meal1, depot1, transport, disposal, blood, tissue } = STATE;
 const STARTS_AT_MMOL = 6.2;
 /** Blood glucose is held above this, mmol/L, so that very strong insulin cannot break the steps. */
 const LEAST_BLOOD_MMOL = 1.5;
@@ -57,7 +58,7 @@ function gramsBySlot(slots: number, life: LivedDays): { eaten: Float64Array; dos
  * from the solution, in as many as it takes; no ordinary dose comes near that.
  */
 function live(step: Stepper, state: Float64Array, milliUnitsPerMinute: number, sensitivity: number, returnPerMinute: number): void {
-  const fastest = Math.max(state[STATE.transport] ?? 0, returnPerMinute + (state[STATE.disposal] ?? 0));
+  const fastest = Math.max(state[transport] ?? 0, returnPerMinute + (state[disposal] ?? 0));
   const steps = Math.max(1, Math.ceil((SLOT_MINUTES * fastest) / LARGEST_STEP_SHARE));
   for (let i = 0; i < steps; i++) step(state, SLOT_MINUTES / steps, milliUnitsPerMinute, sensitivity);
 }
@@ -101,8 +102,8 @@ export function simulate(
     at.basalUnitsPerHour = inForce.basalUnitsPerHour[slotOfDay] ?? 0;
     at.aimMmol = inForce.aimMmol;
 
-    const blood = (state[STATE.blood] ?? 0) / glucoseVolumeL;
-    const now = Math.max(SENSOR_FLOOR_MMOL, blood * (life.sensorFactors[slot] ?? 1));
+    const bloodMmol = (state[blood] ?? 0) / glucoseVolumeL;
+    const now = Math.max(SENSOR_FLOOR_MMOL, bloodMmol * (life.sensorFactors[slot] ?? 1));
     readings[slot] = now;
     seen.nowMmol = now;
     seen.earlierMmol = readings[Math.max(0, slot - SLOPE_SLOTS)] ?? now;
@@ -115,7 +116,7 @@ export function simulate(
       grams += PERSON.rescueGrams;
       lastRescue = slot;
     }
-    if (grams > 0) state[STATE.meal1] = (state[STATE.meal1] ?? 0) + mealMmol(parameters, grams);
+    if (grams > 0) state[meal1] = (state[meal1] ?? 0) + mealMmol(parameters, grams);
 
     const counted = dosed[slot] ?? 0;
     const corrects = counted === 0 && wantsCorrection(slot, now, lastMeal, lastCorrection);
@@ -123,7 +124,7 @@ export function simulate(
     const given = Math.round((wanted * 1000) / bolusStepMilliUnits) * bolusStepMilliUnits;
     if (given > 0) {
       bolus[slot] = given;
-      state[STATE.depot1] = (state[STATE.depot1] ?? 0) + given;
+      state[depot1] = (state[depot1] ?? 0) + given;
       if (corrects) {
         isCorrection[slot] = 1;
         lastCorrection = slot;
@@ -135,8 +136,8 @@ export function simulate(
     basal[slot] = delivered;
     beyond[slot] = (given + delivered) / 1000 - at.basalUnitsPerHour / SLOTS_PER_HOUR;
     live(step, state, delivered / SLOT_MINUTES, life.sensitivity[slot] ?? 1, parameters.returnPerMinute);
-    if (!((state[STATE.blood] ?? 0) >= leastBloodMmol)) state[STATE.blood] = leastBloodMmol;
-    if (!((state[STATE.tissue] ?? 0) >= 0)) state[STATE.tissue] = 0;
+    if (!((state[blood] ?? 0) >= leastBloodMmol)) state[blood] = leastBloodMmol;
+    if (!((state[tissue] ?? 0) >= 0)) state[tissue] = 0;
   }
   return { days: life.days, glucoseMgDl: readings.map(mmolToMgDl), basalMilliUnits: basal, bolusMilliUnits: bolus, isCorrection };
 }

@@ -6,16 +6,16 @@ import type { JournalRow } from "@/db/repositories/journals";
 import { listReadings } from "@/db/repositories/readings";
 import { listRollups } from "@/db/repositories/rollups";
 import { authorize, type Actor } from "@/domain/access/policy";
+import { civilOf } from "@/domain/civil-time";
 import type { InsulinDay } from "@/domain/comparison/adjusted";
 import { seriesOf } from "@/domain/comparison/day-series";
 import type { DayValue } from "@/domain/comparison/day-value";
 import { eventSeries } from "@/domain/comparison/event-series";
 import { MEAL_STARTS } from "@/domain/comparison/governed-parts";
 import type { OutcomeId } from "@/domain/comparison/outcomes";
-import { dayNumberOf, dayStart } from "@/domain/day-start";
-import { isoDayOf, isoDayOfNumber } from "@/domain/iso-day";
+import { dayStart } from "@/domain/day-start";
+import { isoDayOfNumber } from "@/domain/iso-day";
 import { DAY_FLAGS, daysLeftOut } from "@/domain/journal/day-flag";
-import { localOfInstant } from "@/domain/local-time";
 
 const WHOLE_LOG_FRACTION = 0.95;
 const NIGHT_MINUTES = 360;
@@ -49,7 +49,7 @@ export async function dayData(
   const events = needsEvents ? await eventOutcomes(ctx.db, journal, from, to, meals, leftOut) : NO_EVENTS;
   const carbs = new Map<number, number>();
   for (const { at, data } of meals) {
-    const day = dayNumberOf(isoDayOf(at, journal.timeZone));
+    const day = civilOf(at.getTime(), journal.timeZone).dayNumber;
     if (data.kind === "meal") carbs.set(day, (carbs.get(day) ?? 0) + data.carbohydrateGrams);
   }
   const glucoseOf = (rows: typeof days) => new Map(rows.map((r) => [r.dayNumber, r]));
@@ -95,9 +95,8 @@ async function eventOutcomes(
   const doses = await listEntries(db, journal.id, from, to, "dose");
   const placed = (rows: typeof meals) =>
     rows.map((row) => {
-      const local = localOfInstant(row.at, journal.timeZone);
-      const minute = Number(local.slice(11, 13)) * 60 + Number(local.slice(14, 16));
-      return { atMs: row.at.getTime(), day: dayNumberOf(local.slice(0, 10)), minute, data: row.data };
+      const { dayNumber, minuteOfDay } = civilOf(row.at.getTime(), journal.timeZone);
+      return { atMs: row.at.getTime(), day: dayNumber, minute: minuteOfDay, data: row.data };
     });
   const atMeals = placed(meals).filter(({ data }) => data.kind === "meal" && data.carbohydrateGrams >= 15);
   const corrections = placed(doses).filter(({ data }) => data.kind === "dose" && data.doseKind === "correction");
