@@ -18,11 +18,13 @@ export function JournalShell({
   const base = `/j/${journalId}`;
   const room = usePathname().slice(base.length + 1).split("/")[0] ?? "";
   const word = (path: string, label: string, isCurrent = room === path): NavWord => ({ href: `${base}/${path}`, label, isCurrent });
-  const shown = DESK.filter(([path]) => isOwner || (path !== "circle" && path !== "data"));
+  const shown = DESK.filter(([path]) => isOwner || path !== "data");
+  const inCircle = (path: string, label: string): readonly [string, string] =>
+    !isOwner && path === "circle" ? ["circle/comments", "Comments"] : [path, label];
   return (
     <Shell
       home={`${base}/today`}
-      words={shown.map(([path, label]) => word(path, label))}
+      words={shown.map(([path, label]) => word(...inCircle(path, label), room === path))}
       more={[word("fallback", "Fallback card"), { href: "/journals", label: "Journals", isCurrent: false }]}
       phoneWords={PHONE.map(([path, label]) => word(path, label, path === "more" ? BEHIND_MORE.includes(room) : room === path))}
     >

@@ -20,13 +20,14 @@ export const ROLE_OPTIONS: ReadonlyArray<Readonly<{ value: HelperRole; label: st
   { value: "family", label: "Family helper", hint: "Reads and logs what you allow." },
 ];
 
-export const SCOPE_OPTIONS: ReadonlyArray<Readonly<{ value: Scope; label: string }>> = [
-  { value: "settings", label: "Settings and their versions" },
-  { value: "glucose", label: "Glucose and comparisons" },
-  { value: "entries", label: "What is logged: meals, doses, days" },
-  { value: "notes", label: "Notes" },
-  { value: "feelings", label: "How I feel" },
-  { value: "photos", label: "Photos" },
+/** What can be shared: beside its box, and within a sentence. */
+export const SCOPE_OPTIONS: ReadonlyArray<Readonly<{ value: Scope; label: string; inSentence: string }>> = [
+  { value: "settings", label: "Settings and their versions", inSentence: "settings" },
+  { value: "glucose", label: "Glucose and comparisons", inSentence: "glucose and comparisons" },
+  { value: "entries", label: "What is logged: meals, doses, days", inSentence: "what is logged" },
+  { value: "notes", label: "Notes", inSentence: "notes" },
+  { value: "feelings", label: "Feelings", inSentence: "feelings" },
+  { value: "photos", label: "Photos", inSentence: "photos" },
 ];
 
 /** Said when a mentor's comment holds a number for a setting (content.md 9). */

@@ -14,9 +14,7 @@ export function CommentItem({ comment }: Readonly<{ comment: Comment }>) {
         {comment.authorRole && !comment.isOwn ? `, ${ROLE_WORDS[comment.authorRole]}` : ""}
         {" · "}
         <time dateTime={comment.createdAt.toISOString()}>{comment.when}</time>
-        {signs.map((sign) => (
-          <span key={sign} className="ml-2 border border-edge px-1.5 text-ink">{sign}</span>
-        ))}
+        {signs.map((sign) => <span key={sign} className="font-semibold text-ink"> · {sign}</span>)}
       </p>
       <p dir="auto" className="mt-1 whitespace-pre-line break-words">{comment.body}</p>
     </>

@@ -6,12 +6,10 @@ import type { Helper, OpenInvitation } from "../queries/circle";
 import { LimitForm } from "./limit-form";
 import { PressForm } from "./press-form";
 
-/** What is shared, in words: "settings and their versions, glucose and comparisons". */
+/** What is shared, in words: "settings, glucose and comparisons, notes". */
 export function scopesText(scopes: ReadonlyArray<Scope>): string {
-  const labels = SCOPE_OPTIONS.filter(({ value }) => scopes.includes(value)).map(({ label }) => label);
-  if (labels.length === 0) return "nothing but the name of the notebook";
-  const text = labels.join("; ");
-  return text.charAt(0).toLowerCase() + text.slice(1);
+  const words = SCOPE_OPTIONS.filter(({ value }) => scopes.includes(value)).map(({ inSentence }) => inSentence);
+  return words.length > 0 ? words.join(", ") : "nothing but the name of the notebook";
 }
 
 /** Everybody who helps, with what they see; each can be limited or removed here. */

@@ -3,9 +3,9 @@ import { EmailFrame, EmailText } from "@/components/email-frame";
 
 /** Says that there is something to read and where; never what. */
 export function NewCommentMail({
-  authorName, ownerName, isOwn, isQuestion, href, accountHref,
-}: Readonly<{ authorName: string; ownerName: string; isOwn: boolean; isQuestion: boolean; href: string; accountHref: string }>) {
-  const notebook = isOwn ? "your notebook" : `${ownerName}’s notebook`;
+  authorName, ownerName, isByOwner, isOwn, isQuestion, href, accountHref,
+}: Readonly<{ authorName: string; ownerName: string; isByOwner: boolean; isOwn: boolean; isQuestion: boolean; href: string; accountHref: string }>) {
+  const notebook = isOwn ? "your notebook" : isByOwner ? "the notebook you help with" : `${ownerName}’s notebook`;
   return (
     <EmailFrame
       preview={`Something new to read in ${notebook}.`}
@@ -14,7 +14,9 @@ export function NewCommentMail({
       foot={
         <>
           You get this because you {isOwn ? "keep this notebook" : "are in the circle of this notebook"}. Until you have marked its comments as
-          read, at most one such mail comes a day. <Link style={{ color: "inherit", textDecoration: "underline" }} href={accountHref}>Choose what is told to you by mail</Link>.
+          read, at most one such mail comes a day.
+          <br />
+          <Link style={{ color: "inherit", textDecoration: "underline" }} href={accountHref}>Choose what is told to you by mail</Link>
         </>
       }
     >

@@ -38,7 +38,7 @@ export async function newCommentMails(ctx: Context, said: Said): Promise<NewMail
     const readUpTo = await findReadUpTo(ctx.db, journalId, member.userId);
     const body = await renderMail(
       NewCommentMail({
-        authorName, ownerName: owner?.displayName ?? "", isOwn: member.role === "person", isQuestion: kind === "question",
+        authorName, ownerName: owner?.displayName ?? "", isByOwner: owner?.id === userId, isOwn: member.role === "person", isQuestion: kind === "question",
         href: `${env.publicOrigin}${subjectPath(journalId, subject, subjectKey)}`, accountHref: `${env.publicOrigin}/account#mail`,
       }),
     );

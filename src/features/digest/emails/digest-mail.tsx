@@ -19,8 +19,11 @@ export function DigestMail({
       foot={
         <>
           You get this once a week because you keep or help with a notebook in Notchbook. It is not medical advice: a licensed
-          professional who knows the person decides. <Link style={PLAIN_LINK} href={`${origin}/account#mail`}>Choose how much, and when</Link>{" "}
-          or <Link style={PLAIN_LINK} href={unsubscribeHref}>end these weekly mails</Link>.
+          professional who knows the person decides.
+          <br />
+          <Link style={PLAIN_LINK} href={`${origin}/account#mail`}>Choose how much, and when</Link>
+          <br />
+          <Link style={PLAIN_LINK} href={unsubscribeHref}>End these weekly mails</Link>
         </>
       }
     >

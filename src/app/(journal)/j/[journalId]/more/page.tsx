@@ -10,6 +10,7 @@ const ROOMS = [
   { path: "plan", label: "Plan", hint: "Phases, tasks and follow-ups", isForHelpers: true },
   { path: "fallback", label: "Fallback card", hint: "The way back, and whom to call", isForHelpers: true },
   { path: "start/about-you", label: "Starting profile", hint: "The pages that work it out", isForHelpers: false },
+  { path: "circle/comments", label: "Comments and questions", hint: "What was said, and what waits for an answer", isForHelpers: true },
   { path: "circle", label: "Circle", hint: "Who helps, and what each sees", isForHelpers: false },
   { path: "data", label: "Data", hint: "Glucose files in", isForHelpers: false },
 ] as const;
