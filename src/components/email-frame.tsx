@@ -18,7 +18,9 @@ export function EmailFrame({
 }>) {
   return (
     <Html lang="en">
-      <Head />
+      <Head>
+        <title>{heading}</title>
+      </Head>
       <Preview>{preview}</Preview>
       <Body style={{ background: PAPER, fontFamily: "Verdana, Geneva, sans-serif", margin: 0, padding: "24px 0" }}>
         <Container style={{ maxWidth: "560px", borderLeft: `2px solid ${INK}`, padding: "4px 24px" }}>

@@ -1,5 +1,6 @@
 import { date, integer, index, jsonb, pgTable, primaryKey, text, timestamp, uuid } from "drizzle-orm/pg-core";
 import type { JournalRole, Scope } from "@/domain/access/policy";
+import type { DraftAnswers } from "@/domain/onboarding/draft";
 import type { GlucoseUnit } from "@/domain/units";
 import { users } from "./people";
 
@@ -86,7 +87,7 @@ export const wizardDrafts = pgTable("wizard_drafts", {
   journalId: uuid()
     .primaryKey()
     .references(() => journals.id, { onDelete: "cascade" }),
-  answers: jsonb().$type<Record<string, Record<string, unknown>>>().notNull(),
+  answers: jsonb().$type<DraftAnswers>().notNull(),
   rowVersion: integer().notNull().default(1),
   updatedAt: timestamp({ withTimezone: true }).notNull(),
   updatedBy: uuid()
