@@ -65,6 +65,7 @@ const TABLE = {
 
   "circle.read": { to: "journal", roles: PERSON },
   "circle.manage": { to: "journal", roles: PERSON },
+  "circle.leave": { to: "journal", roles: ["mentor", "educator", "family"] },
   "access-log.read": { to: "journal", roles: PERSON },
 
   "fallback.read": { to: "journal", roles: CIRCLE, scope: "settings" },

@@ -25,6 +25,11 @@ export type DemoTruth = Readonly<{
  * What is true of the invented person, chosen by search so that the comparison gives
  * the answers of the story: nights that need more than is programmed, afternoons that
  * need less, and a loop that is eager enough to matter and no more.
+ *
+ * In the long run version 2 lowers the hours after breakfast by about 10 mg/dL, version
+ * 3 the nights by about 5, and version 4 adds about 0.4 points of lows. What these 32
+ * days show of the last two is larger: a difference that gets called after so few days
+ * commonly is (comparison.md 3.5), and this chance was picked because it is called.
  */
 export const DEMO_TRUTH: DemoTruth = {
   seed: 818,

@@ -9,13 +9,13 @@ import { PressForm } from "@/features/circle/components/press-form";
 import { invitationByLink, waitingInvitations } from "@/features/circle/queries/invitation";
 import { forPage } from "@/lib/action";
 
-export const metadata: Metadata = { title: "Invitation", referrer: "no-referrer" };
+export const metadata: Metadata = { title: "Invitation", referrer: "same-origin" };
 
 type Search = Readonly<{ searchParams: Promise<{ token?: string | string[] }> }>;
 
 const MARGIN = (
   <MarginNote title="Before you accept">
-    <p>You see only what is listed, and each look stands in a log that the other can read. Nothing you write here is medical advice, and you can leave at any time by asking to be removed.</p>
+    <p>You see only what is listed, and each look stands in a log that the other can read. Nothing you write here is medical advice, and you can leave at any time.</p>
   </MarginNote>
 );
 

@@ -3,7 +3,7 @@ import Link from "next/link";
 import { Page } from "@/components/page";
 import { UnsubscribeForm } from "@/features/digest/components/unsubscribe-form";
 
-export const metadata: Metadata = { title: "Weekly mails", referrer: "no-referrer" };
+export const metadata: Metadata = { title: "Weekly mails", referrer: "same-origin" };
 
 type Search = Readonly<{ searchParams: Promise<{ token?: string | string[]; done?: string | string[] }> }>;
 

@@ -17,7 +17,7 @@ import { saveStepInput, type SaveStepInput } from "../schema";
  */
 export async function saveStep(ctx: Context, input: SaveStepInput): Promise<{ next: WizardStep; rowVersion: number }> {
   const { journalId, step, rowVersion } = saveStepInput.parse(input);
-  const { journalId: _id, step: _step, rowVersion: _version, ...typed } = input;
+  const { journalId: _id, step: _step, rowVersion: _version, returnTo: _returnTo, ...typed } = input;
   const read = STEP_SCHEMAS[step].parse(typed);
   authorize(ctx.actor, "draft.save", journalId);
   const { userId } = requireUser(ctx.actor);

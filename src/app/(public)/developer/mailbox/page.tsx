@@ -7,7 +7,7 @@ import { LetterView } from "@/features/digest/components/letter-view";
 import { mailbox, type Letter } from "@/features/digest/queries/mailbox";
 import { forPage } from "@/lib/action";
 
-export const metadata: Metadata = { title: "Local mailbox", referrer: "no-referrer" };
+export const metadata: Metadata = { title: "Local mailbox", referrer: "same-origin" };
 
 type Search = Readonly<{ searchParams: Promise<{ letter?: string | string[] }> }>;
 

@@ -2,7 +2,6 @@ import type { Metadata } from "next";
 import Link from "next/link";
 import { Empty } from "@/components/notice";
 import { MarginNote, Page } from "@/components/page";
-import { momentText } from "@/domain/digest/date-text";
 import { ROLE_WORDS } from "@/features/circle/constants";
 import { accessLines } from "@/features/circle/queries/access-log";
 import { forPage } from "@/lib/action";
@@ -11,7 +10,7 @@ export const metadata: Metadata = { title: "Who looked" };
 
 export default async function AccessLogPage({ params }: Readonly<{ params: Promise<{ journalId: string }> }>) {
   const { journalId } = await params;
-  const { lines, timeZone } = await forPage((ctx) => accessLines(ctx, { journalId }));
+  const lines = await forPage((ctx) => accessLines(ctx, { journalId }));
   return (
     <Page
       eyebrow={<Link className="link" href={`/j/${journalId}/circle`}>Circle</Link>}
@@ -28,11 +27,11 @@ export default async function AccessLogPage({ params }: Readonly<{ params: Promi
         </Empty>
       ) : (
         <ol className="mt-6 max-w-text">
-          {lines.map(({ at, name, role, what }, i) => (
+          {lines.map(({ at, when, times, name, role, what }, i) => (
             <li key={`${at.toISOString()}-${i}`} className="border-t border-hairline py-2.5">
               <span className="font-semibold">{what.charAt(0).toUpperCase() + what.slice(1)}</span>
               <span className="block text-note text-soft">
-                {name}, {ROLE_WORDS[role]} · <time dateTime={at.toISOString()}>{momentText(at, timeZone)}</time>
+                {name}, {ROLE_WORDS[role]} · <time dateTime={at.toISOString()}>{when}</time>{times > 1 ? `, ${times} times that day` : ""}
               </span>
             </li>
           ))}
