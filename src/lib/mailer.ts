@@ -15,8 +15,15 @@ const GIVE_UP_AFTER_MS = 20 * 3_600_000;
 /** A template as the two parts of a mail, both complete. */
 export async function renderMail(template: ReactElement): Promise<{ html: string; text: string }> {
   const html = await render(template);
-  return { html, text: toPlainText(html) };
+  return { html, text: toPlainText(html, { selectors: TEXT_HEADINGS }) };
 }
+
+/** Headings of the text part: set off by one empty line, the lesser ones as they are written. */
+const TEXT_HEADINGS = [
+  { selector: "h2", options: { leadingLineBreaks: 3, trailingLineBreaks: 1, uppercase: true } },
+  { selector: "h3", options: { leadingLineBreaks: 2, trailingLineBreaks: 1, uppercase: false } },
+  { selector: "ul", options: { itemPrefix: "- ", leadingLineBreaks: 1, trailingLineBreaks: 2 } },
+];
 
 /** Hand one mail to the provider. @returns its id there, or why not */
 export type Send = (mail: LeasedMail) => Promise<{ providerId: string } | { error: string; isFinal: boolean }>;

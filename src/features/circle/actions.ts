@@ -8,6 +8,7 @@ import type { AcceptInvitationInput, AddCommentInput, InviteHelperInput, LimitHe
 import { acceptInvitation } from "./use-cases/accept-invitation";
 import { addComment } from "./use-cases/add-comment";
 import { inviteHelper } from "./use-cases/invite-helper";
+import { leaveCircle } from "./use-cases/leave-circle";
 import { limitHelper } from "./use-cases/limit-helper";
 import { markCommentsRead } from "./use-cases/mark-comments-read";
 import { removeHelper } from "./use-cases/remove-helper";
@@ -42,6 +43,12 @@ export async function acceptInvitationAction(_previous: Previous, form: FormData
   const result = await toActionResult((ctx) => acceptInvitation(ctx, formValues(form) as AcceptInvitationInput), form);
   if (!result.ok) return result;
   redirect(`/j/${result.data.journalId}/today`);
+}
+
+export async function leaveCircleAction(_previous: Previous, form: FormData): Promise<ActionResult> {
+  const result = await toActionResult((ctx) => leaveCircle(ctx, formValues(form) as { journalId: string }), form);
+  if (!result.ok) return result;
+  redirect("/journals");
 }
 
 export async function addCommentAction(_previous: Previous, form: FormData): Promise<ActionResult> {

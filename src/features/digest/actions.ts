@@ -1,5 +1,6 @@
 "use server";
 
+import { refresh } from "next/cache";
 import { redirect } from "next/navigation";
 import { formValues, toActionResult, type ActionResult } from "@/lib/action";
 import { lentFinding } from "@/lib/lent-findings";
@@ -11,7 +12,9 @@ import { unsubscribe } from "./use-cases/unsubscribe";
 type Previous = ActionResult | null;
 
 export async function saveDigestPreferenceAction(_previous: Previous, form: FormData): Promise<ActionResult> {
-  return toActionResult((ctx) => saveDigestPreference(ctx, formValues(form) as DigestPreferenceInput), form);
+  const result = await toActionResult((ctx) => saveDigestPreference(ctx, formValues(form) as DigestPreferenceInput), form);
+  if (result.ok) refresh();
+  return result;
 }
 
 export async function sendDigestNowAction(_previous: Previous, form: FormData): Promise<ActionResult> {

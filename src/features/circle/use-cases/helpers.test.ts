@@ -14,6 +14,7 @@ import { accessLines } from "../queries/access-log";
 import { circle } from "../queries/circle";
 import { acceptInvitation } from "./accept-invitation";
 import { inviteHelper } from "./invite-helper";
+import { leaveCircle } from "./leave-circle";
 import { limitHelper } from "./limit-helper";
 import { removeHelper } from "./remove-helper";
 
@@ -88,6 +89,17 @@ describe("helpers", () => {
     });
   });
 
+  it("may leave by themselves; the person can't", async () => {
+    const { journalId, ownerId, mentorId } = await withMentor();
+    await expect(leaveCircle(await contextFor(db, ownerId), { journalId })).rejects.toMatchObject({ code: "FORBIDDEN" });
+    await expect(leaveCircle(await strangerContext(db), { journalId })).rejects.toMatchObject({ code: "NOT_FOUND" });
+    await expect(leaveCircle(anonymousContext(db), { journalId })).rejects.toMatchObject({ code: "UNAUTHENTICATED" });
+    await leaveCircle(await contextFor(db, mentorId), { journalId });
+    expect(await listLiveGrants(db, mentorId, TEST_NOW)).toEqual([]);
+    expect(await listLiveGrants(db, ownerId, TEST_NOW)).toHaveLength(1);
+    expect(await eventsOf(journalId)).toMatchObject([{ action: "circle.leave", actorId: mentorId }]);
+  });
+
   it("are limited and removed by the person alone", async () => {
     const journal = await withMentor();
     const { journalId, mentorId } = journal;
@@ -112,11 +124,19 @@ describe("helpers", () => {
     await recordRead(await contextFor(db, mentorId, at(1)), journalId, "changes");
     await recordRead(await contextFor(db, mentorId, at(2)), journalId, "version 3");
     await recordRead(await contextFor(db, ownerId, at(3)), journalId, "changes");
-    const { lines, timeZone } = await accessLines(await contextFor(db, ownerId), { journalId });
-    expect(timeZone).toBe("Europe/Oslo");
-    expect(lines).toEqual([
-      { at: at(2), name: "A mentor", role: "mentor", what: "version 3" },
-      { at: at(1), name: "A mentor", role: "mentor", what: "changes" },
+    const lines = await accessLines(await contextFor(db, ownerId), { journalId });
+    expect(lines).toMatchObject([
+      { name: "A mentor", role: "mentor", what: "version 3", times: 1, when: "Tuesday 10 March, 10:02" },
+      { name: "A mentor", role: "mentor", what: "changes", times: 1, when: "Tuesday 10 March, 10:01" },
     ]);
+  });
+
+  it("who look at the same again and again on one day stand in one line with a count", async () => {
+    const { journalId, ownerId, mentorId } = await withMentor();
+    const at = (minute: number) => new Date(TEST_NOW.getTime() + minute * 60_000);
+    for (const minute of [1, 2, 3]) await recordRead(await contextFor(db, mentorId, at(minute)), journalId, "changes");
+    await recordRead(await contextFor(db, mentorId, at(24 * 60)), journalId, "changes");
+    const lines = await accessLines(await contextFor(db, ownerId), { journalId });
+    expect(lines.map(({ times, when }) => [times, when])).toEqual([[1, "Wednesday 11 March, 10:00"], [3, "Tuesday 10 March, 10:03"]]);
   });
 });

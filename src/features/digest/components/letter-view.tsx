@@ -14,8 +14,8 @@ export function LetterView({ letter }: Readonly<{ letter: Letter }>) {
       <h3 className="mt-6 font-sans text-base font-semibold">HTML part</h3>
       <iframe
         title={`HTML part of “${letter.subject}”`}
-        sandbox="allow-top-navigation-by-user-activation"
-        srcDoc={`<base target="_top">${letter.html}`}
+        sandbox="allow-popups allow-popups-to-escape-sandbox"
+        srcDoc={letter.html}
         className="mt-2 h-[34rem] w-full border border-edge bg-paper"
       />
       {headers.length > 0 ? (

@@ -11,7 +11,7 @@ export async function MailChoices() {
   const { preference, digest, timeZone } = await forPage((ctx) => digestPreview(ctx, lentFinding));
   return (
     <Section title="Mail" id="mail">
-      <DigestPreferencesForm key={JSON.stringify(preference)} preference={preference} timeZone={timeZone} />
+      <DigestPreferencesForm preference={preference} timeZone={timeZone} />
       {digest ? (
         <>
           <details className="mt-6">
