@@ -26,6 +26,8 @@ export async function migrateDatabase(ownerUrl: string, appRole: string): Promis
     await sql`grant select, insert, update, delete on all tables in schema public, pgboss to ${role}`;
     await sql`grant usage, select on all sequences in schema public, pgboss to ${role}`;
     await sql`grant execute on all functions in schema pgboss to ${role}`;
+    await sql`grant usage on schema drizzle to ${role}`;
+    await sql`grant select on all tables in schema drizzle to ${role}`;
     for (const table of APPEND_ONLY) {
       await sql`revoke update, delete, truncate on ${sql(table)} from ${role}`;
     }

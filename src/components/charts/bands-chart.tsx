@@ -4,7 +4,7 @@ import { CategoryScale, Chart, Filler, LinearScale, LineElement, PointElement, T
 import { useEffect, useState } from "react";
 import { Line } from "react-chartjs-2";
 import { clockText } from "@/domain/settings/clock-text";
-import type { Band } from "./bands";
+import type { Band } from "./band";
 
 Chart.register(CategoryScale, LinearScale, PointElement, LineElement, Filler, Tooltip);
 

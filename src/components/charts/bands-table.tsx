@@ -1,5 +1,5 @@
 import { clockText } from "@/domain/settings/clock-text";
-import type { Band } from "./bands";
+import type { Band } from "./band";
 
 /** The time-of-day bands as a table, every three hours. */
 export function BandsTable({ before, after, format }: Readonly<{ before: ReadonlyArray<Band>; after: ReadonlyArray<Band>; format: (value: number) => string }>) {

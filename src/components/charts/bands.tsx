@@ -4,8 +4,6 @@ import dynamic from "next/dynamic";
 import type { ComponentProps } from "react";
 import type BandsChart from "./bands-chart";
 
-export type Band = Readonly<{ minute: number; p25: number; p50: number; p75: number }>;
-
 const Drawn = dynamic(() => import("./bands-chart"), {
   ssr: false,
   loading: () => <div className="h-72 border-y border-hairline desk:h-80" />,

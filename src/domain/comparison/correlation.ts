@@ -13,10 +13,21 @@ const ALIKENESS = {
 
 const DRIFT_DAYS = 14;
 
-/** Correlation of two days that lie `gapDays` calendar days apart; 1 for a day with itself. */
-export function dayCorrelation(kind: OutcomeKind, gapDays: number): number {
+/** Worked out once for every whole gap up to this many days: a comparison asks for it thousands of times. */
+const GAPS_KEPT = 200;
+const KEPT: Readonly<Record<OutcomeKind, Float64Array>> = {
+  day: Float64Array.from({ length: GAPS_KEPT }, (_, gap) => workedOut("day", gap)),
+  win: Float64Array.from({ length: GAPS_KEPT }, (_, gap) => workedOut("win", gap)),
+};
+
+function workedOut(kind: OutcomeKind, gapDays: number): number {
   const { rho, kappa } = ALIKENESS[kind];
   return (1 - kappa) * rho ** gapDays + kappa * Math.exp(-gapDays / DRIFT_DAYS);
+}
+
+/** Correlation of two days that lie `gapDays` calendar days apart; 1 for a day with itself. */
+export function dayCorrelation(kind: OutcomeKind, gapDays: number): number {
+  return KEPT[kind][gapDays] ?? workedOut(kind, gapDays);
 }
 
 /**
