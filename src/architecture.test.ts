@@ -9,7 +9,8 @@ const files = readdirSync(SRC, { recursive: true, encoding: "utf8" })
   .filter((f) => /\.tsx?$/.test(f) && !/\.(test|d)\.tsx?$/.test(f))
   .map((f) => ({ path: relative(SRC, join(SRC, f)).replaceAll("\\", "/"), text: readFileSync(join(SRC, f), "utf8") }));
 
-const importsOf = (text: string) => [...text.matchAll(/(?:from|import)\s*\(?\s*"([^"]+)"/g)].map(([, specifier = ""]) => specifier);
+const IMPORT = /^(?:import|export)\s[^;]*?from\s+"([^"]+)"|^import\s+"([^"]+)"|import\(\s*"([^"]+)"\)/gm;
+const importsOf = (text: string) => [...text.matchAll(IMPORT)].map(([, from, bare, dynamic]) => from ?? bare ?? dynamic ?? "");
 
 /** What each room may import. The order is domain, db, lib, features, app; arrows point left. */
 const MAY_IMPORT: Record<string, RegExp> = {

@@ -42,3 +42,19 @@ export function civilOf(epochMs: number, zone: string): { dayNumber: number; min
   const dayNumber = Math.floor(minutes / DAY_MIN);
   return { dayNumber, minuteOfDay: minutes - dayNumber * DAY_MIN };
 }
+
+/** The instant at which a civil day begins, epoch milliseconds, found from the offsets around it. */
+function dayBegins(dayNumber: number, zone: string): number {
+  const wall = dayNumber * DAY_MIN * MINUTE_MS;
+  const guess = wall - offsetMinutes(wall, zone) * MINUTE_MS;
+  return wall - offsetMinutes(guess, zone) * MINUTE_MS;
+}
+
+/** Real minutes of a civil day (1380, 1440, 1500, or off by half an hour) and of its 00:00-06:00. */
+export function minutesInCivilDay(dayNumber: number, zone: string): { day: number; night: number } {
+  const begins = dayBegins(dayNumber, zone);
+  const nextBegins = dayBegins(dayNumber + 1, zone);
+  const sixOClock = (dayNumber * DAY_MIN + 360) * MINUTE_MS;
+  const six = sixOClock - offsetMinutes(sixOClock - offsetMinutes(sixOClock, zone) * MINUTE_MS, zone) * MINUTE_MS;
+  return { day: (nextBegins - begins) / MINUTE_MS, night: (six - begins) / MINUTE_MS };
+}
