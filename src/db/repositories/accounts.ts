@@ -1,4 +1,4 @@
-import { eq } from "drizzle-orm";
+import { count, eq, isNull } from "drizzle-orm";
 import type { Db } from "@/db/client";
 import { credentials, users } from "@/db/schema/people";
 import type { GlucoseUnit } from "@/domain/units";
@@ -76,4 +76,10 @@ export async function updateAccount(
   changes: { displayName: string; timeZone: string; glucoseUnit: GlucoseUnit },
 ): Promise<void> {
   await db.update(users).set(changes).where(eq(users.id, userId));
+}
+
+/** How many accounts there are, and how many of them have verified their address. */
+export async function countAccounts(db: Db): Promise<{ all: number; verified: number }> {
+  const [row] = await db.select({ all: count(), verified: count(users.emailVerifiedAt) }).from(users).where(isNull(users.closedAt));
+  return row ?? { all: 0, verified: 0 };
 }

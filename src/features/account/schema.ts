@@ -64,3 +64,6 @@ export const createTokenInput = z.object({
 export const revokeTokenInput = z.object({ tokenId: z.uuid() });
 
 export const demoRoleInput = z.object({ role: z.enum(["person", "mentor", "educator", "family", "administrator"]) });
+
+/** For a button that carries nothing. */
+export const nothingInput = z.object({});

@@ -1,9 +1,10 @@
 import "server-only";
 import { appendEvent } from "@/db/repositories/journal-events";
-import { findJournal } from "@/db/repositories/journals";
+import { findJournal, updateJournal } from "@/db/repositories/journals";
 import { findVersionForUpdate, listVersions, moveVersion } from "@/db/repositories/versions";
 import { authorize, requireUser } from "@/domain/access/policy";
 import { AppError } from "@/domain/errors";
+import { isoDayOf } from "@/domain/iso-day";
 import { assertEdge } from "@/domain/journal/version-lifecycle";
 import { assertMayTakeEffect, assertSameContent } from "@/domain/journal/version-lifecycle-rules";
 import { instantOfLocal } from "@/domain/local-time";
@@ -12,7 +13,8 @@ import { effectInput, type EffectInput } from "../schema";
 
 /**
  * The person says since when the approved settings are on the device. Nothing
- * is sent to a device; this only writes down what was done there.
+ * is sent to a device; this only writes down what was done there. The first
+ * version in effect makes its day day 1 of the journal.
  *
  * @throws {AppError} CONFLICT without a live approval, STALE when the version is
  *   not the one shown, INVALID_INPUT on `effectiveFrom` for a time that can't be
@@ -39,6 +41,7 @@ export async function putIntoEffect(ctx: Context, input: EffectInput): Promise<{
     }
     const isMoved = await moveVersion(tx, { journalId, number, from: version.state, to: state, at }, { effectiveFrom });
     if (!isMoved) throw new AppError("CONFLICT", `version ${number} is no longer ${version.state}`);
+    if (journal.startedOn === null) await updateJournal(tx, journalId, { startedOn: isoDayOf(effectiveFrom, journal.timeZone) });
     await appendEvent(tx, { journalId, at, actorId: userId, actorKind: "user", action: "version.effect", subject: `version ${number}`, requestId: ctx.requestId });
     return { number, effectiveFrom };
   });

@@ -3,25 +3,25 @@ import Link from "next/link";
 import { Empty } from "@/components/notice";
 import { Page } from "@/components/page";
 import { momentText } from "@/domain/digest/date-text";
-import { LetterView } from "@/features/digest/components/letter-view";
+import { LetterView, type LetterPart } from "@/features/digest/components/letter-view";
 import { mailbox, type Letter } from "@/features/digest/queries/mailbox";
 import { forPage } from "@/lib/action";
 
 export const metadata: Metadata = { title: "Local mailbox", referrer: "same-origin" };
 
-type Search = Readonly<{ searchParams: Promise<{ letter?: string | string[] }> }>;
+type Search = Readonly<{ searchParams: Promise<{ letter?: string | string[]; part?: string | string[] }> }>;
 
 export default async function MailboxPage({ searchParams }: Search) {
-  const { letter: wanted } = await searchParams;
+  const { letter: wanted, part } = await searchParams;
   const letters = await forPage((ctx) => mailbox(ctx));
   const letter = letters.find(({ id }) => id === wanted);
-  return letter ? <OneLetter letter={letter} /> : <AllLetters letters={letters} />;
+  return letter ? <OneLetter letter={letter} part={part === "html" ? "html" : "text"} /> : <AllLetters letters={letters} />;
 }
 
-function OneLetter({ letter }: Readonly<{ letter: Letter }>) {
+function OneLetter({ letter, part }: Readonly<{ letter: Letter; part: LetterPart }>) {
   return (
     <Page eyebrow={<Link className="link" href="/developer/mailbox">Local mailbox</Link>} title={letter.subject} lead={<LetterLine letter={letter} />}>
-      <LetterView letter={letter} />
+      <LetterView letter={letter} part={part} />
     </Page>
   );
 }
