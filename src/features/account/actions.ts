@@ -15,6 +15,7 @@ import { signIn } from "./use-cases/sign-in";
 import { signInToDemo } from "./use-cases/sign-in-to-demo";
 import { signOut } from "./use-cases/sign-out";
 import { signUp } from "./use-cases/sign-up";
+import { submitCredential } from "./use-cases/submit-credential";
 import { updateProfile } from "./use-cases/update-profile";
 import { verifyEmail } from "./use-cases/verify-email";
 
@@ -101,4 +102,8 @@ export async function endSessionAction(_previous: Previous, form: FormData): Pro
     const { userId, sessionId } = endSession(ctx, values<{ sessionId: string }>(form));
     await revokeSession(userId, sessionId);
   }, form);
+}
+
+export async function submitCredentialAction(_previous: Previous, form: FormData): Promise<ActionResult> {
+  return toActionResult((ctx) => submitCredential(ctx, values(form)), form);
 }

@@ -67,3 +67,12 @@ export const demoRoleInput = z.object({ role: z.enum(["person", "mentor", "educa
 
 /** For a button that carries nothing. */
 export const nothingInput = z.object({});
+
+const line = (what: string) => z.string({ error: what }).trim().min(1, what).max(120, "At most 120 characters.");
+
+export const submitCredentialInput = z.object({
+  profession: line("Type your profession."),
+  licenceNumber: line("Type the number of your licence."),
+  jurisdiction: line("Type where the licence holds."),
+  expiresOn: z.iso.date("Type the date it runs out."),
+});

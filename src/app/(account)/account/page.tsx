@@ -3,7 +3,7 @@ import { PressButton } from "@/components/form/press-button";
 import { Page, Section } from "@/components/page";
 import { dateTimeText } from "@/domain/day-text";
 import { endSessionAction } from "@/features/account/actions";
-import { ChangePasswordForm, ProfileForm } from "@/features/account/components/forms";
+import { ChangePasswordForm, LicenceForm, ProfileForm } from "@/features/account/components/forms";
 import { ownAccount } from "@/features/account/queries/account";
 import { MailChoices } from "@/features/digest/components/mail-choices";
 import { forPage } from "@/lib/action";
@@ -35,6 +35,10 @@ export default async function AccountPage() {
         </ul>
       </Section>
       <Section title="Password"><ChangePasswordForm /></Section>
+      <Section title="If you are a licensed educator">
+        <p className="max-w-text">Hand in your licence once. Approvals count while it is verified and valid.</p>
+        <LicenceForm />
+      </Section>
     </Page>
   );
 }

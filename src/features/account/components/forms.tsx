@@ -6,9 +6,9 @@ import { ChoiceField } from "@/components/form/choices";
 import { SelectField, TextField } from "@/components/form/fields";
 import { Notice } from "@/components/notice";
 import {
-  changePasswordAction, requestResetAction, resendVerificationAction, resetPasswordAction, signInAction, updateProfileAction, verifyEmailAction,
+  changePasswordAction, requestResetAction, resendVerificationAction, resetPasswordAction, signInAction, submitCredentialAction, updateProfileAction, verifyEmailAction,
 } from "../actions";
-import { changePasswordInput, nothingInput, requestResetInput, resetPasswordInput, signInInput, updateAccountInput, verifyEmailInput } from "../schema";
+import { changePasswordInput, nothingInput, requestResetInput, resetPasswordInput, signInInput, submitCredentialInput, updateAccountInput, verifyEmailInput } from "../schema";
 
 export function SignInForm({ next }: Readonly<{ next: string }>) {
   return (
@@ -72,5 +72,19 @@ export function ChangePasswordForm() {
         <TextField name="password" label="New password" type="password" autoComplete="new-password" hint="At least 15 characters." />
       </ActionForm>
     </>
+  );
+}
+
+/** An educator's licence; approvals count once an administrator has verified it. */
+export function LicenceForm() {
+  const [isSent, setSent] = useState(false);
+  if (isSent) return <Notice><p>Handed in. An administrator looks at it before your approvals count.</p></Notice>;
+  return (
+    <ActionForm schema={submitCredentialInput} action={submitCredentialAction} submitLabel="Hand in the licence" onDone={() => setSent(true)}>
+      <TextField name="profession" label="Profession" />
+      <TextField name="licenceNumber" label="Licence number" size={20} />
+      <TextField name="jurisdiction" label="Where it holds" />
+      <TextField name="expiresOn" label="Runs out on" type="date" size={12} />
+    </ActionForm>
   );
 }
