@@ -6,6 +6,8 @@ export const DIGEST_CLOCK = "weekly-digest";
 /** One job for each reader who is due. */
 export const DIGEST_OF_READER = "digest-of-reader";
 const EVERY_QUARTER_HOUR = "*/15 * * * *";
+/** Readers taken up together; the pool's few connections set the pace. */
+const AT_ONCE = 100;
 
 export type DigestJob = Readonly<{ userId: string }>;
 
@@ -35,8 +37,8 @@ export async function startJobs(databaseUrl: string, work: DigestWork): Promise<
     }
     logEvent("info", "digest.due", { readers: userIds.length });
   });
-  await boss.work<DigestJob>(DIGEST_OF_READER, { pollingIntervalSeconds: 1, batchSize: 20 }, async (jobs) => {
-    for (const { data } of jobs) await sendOne(work, data.userId);
+  await boss.work<DigestJob>(DIGEST_OF_READER, { pollingIntervalSeconds: 1, batchSize: AT_ONCE }, async (jobs) => {
+    await Promise.all(jobs.map(({ data }) => sendOne(work, data.userId)));
   });
   await boss.send(DIGEST_CLOCK, {});
   return () => boss.stop({ graceful: true, timeout: 10_000 });

@@ -51,7 +51,8 @@ export async function journalWeek(ctx: Context, input: WeekInput, findingOf: Fin
   const told = may("comparison.read") && input.areFindingsWanted ? (versions ?? []).filter((version) => wasInEffect(version, span)) : [];
   await recordRead(ctx, journalId, `${DIGEST_READ}the week`);
   const questions = await listOpenQuestions(ctx.db, journalId, readableSubjects(reader, journalId), ctx.now());
-  const glucose = may("glucose.read");
+  const week = may("glucose.read") ? await addUp(ctx, journalId, to, 7) : null;
+  const fortnight = week && role === "educator" ? await addUp(ctx, journalId, to, 14) : null;
 
   return {
     journalId,
@@ -61,12 +62,12 @@ export async function journalWeek(ctx: Context, input: WeekInput, findingOf: Fin
     lookedOn: look ? isoDayOf(look, zone) : null,
     versions: versions && versionNews(versions, look ? { from: look, until: ctx.now() } : span, zone),
     findings: await findingsOf(journalId, told, findingOf),
-    glucoseDays: glucose ? (await addUpGlucoseDays(ctx.db, journalId, dayNumberOf(from), dayNumberOf(to))).days : null,
+    glucoseDays: week?.daysWithReadings ?? null,
     loggedDays: may("entry.read")
       ? await countLoggedDays(ctx.db, journalId, dayStart(from, journal.timeZone), dayStart(to, journal.timeZone, 1), journal.timeZone)
       : null,
-    week: glucose ? await sharesOf(ctx, journalId, to, 7) : null,
-    fortnight: glucose ? await sharesOf(ctx, journalId, to, 14) : null,
+    week: week?.shares ?? null,
+    fortnight: fortnight?.shares ?? null,
     questions: questions
       .filter(({ authorId }) => authorId !== reader.userId)
       .map(({ authorName, subject, subjectKey }) => ({ askedBy: authorName, about: subjectText(subject, subjectKey) })),
@@ -92,14 +93,15 @@ async function findingsOf(journalId: string, versions: ReadonlyArray<VersionRow>
   return found;
 }
 
-async function sharesOf(ctx: Context, journalId: string, to: string, days: number): Promise<GlucoseShares | null> {
+async function addUp(ctx: Context, journalId: string, to: string, days: number): Promise<{ daysWithReadings: number; shares: GlucoseShares | null }> {
   const last = dayNumberOf(to);
   const sum = await addUpGlucoseDays(ctx.db, journalId, last - days + 1, last);
-  if (sum.readings === 0) return null;
-  return {
+  if (sum.readings === 0) return { daysWithReadings: 0, shares: null };
+  const shares = {
     days,
     inRangeFraction: sum.inRange / sum.readings,
     belowFraction: sum.below / sum.readings,
     coveredFraction: Math.min(1, sum.coveredMinutes / (days * MINUTES_PER_DAY)),
   };
+  return { daysWithReadings: sum.days, shares };
 }

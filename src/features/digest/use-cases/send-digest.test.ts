@@ -2,9 +2,12 @@ import { eq } from "drizzle-orm";
 import { beforeAll, describe, expect, it } from "vitest";
 import type { Pool } from "@/db/client";
 import { accessLog } from "@/db/schema/journals";
+import { entries } from "@/db/schema/diary";
+import { dailyRollups } from "@/db/schema/glucose";
 import { digests, outbox } from "@/db/schema/mail";
 import { revokeGrant } from "@/db/repositories/grants";
 import { saveDigestPreference } from "@/db/repositories/digest-preferences";
+import { addDays, dayNumberOf } from "@/domain/day-start";
 import { DEFAULT_DIGEST_PREFERENCE } from "@/domain/digest/preference";
 import type { FindingOf } from "@/domain/digest/week";
 import { mailConsent } from "@/lib/mail-consent";
@@ -85,6 +88,28 @@ describe("sendDigest", () => {
     expect(theirs?.text).toContain("0.50 U/h → 0.55 U/h");
     expect(theirs?.text).not.toContain("Nights were flatter");
     expect(await db.select().from(accessLog).where(eq(accessLog.journalId, journalId))).toMatchObject([{ userId: mentorId, what: "digest: the week, full" }]);
+  });
+
+  it("adds up the glucose and the log of the seven days before, each on its civil day", async () => {
+    const { journalId, ownerId } = await person();
+    const educatorId = await createHelper(db, { journalId, ownerId, role: "educator", scopes: ["settings", "glucose"] });
+    for (const userId of [ownerId, educatorId]) await saveDigestPreference(db, userId, { ...DEFAULT_DIGEST_PREFERENCE, level: "full" }, BEFORE);
+    const day = (isoDate: string, below: number) => ({
+      journalId, dayNumber: dayNumberOf(isoDate), part: "day" as const, readings: 288, sumMgDl: 0, sumSquares: 0,
+      bandCounts: [0, below, 200, 88 - below, 0], histogram: [], minutesInPart: 1440, intervalMinutes: 5,
+    });
+    const dates = Array.from({ length: 14 }, (_, i) => addDays("2026-03-02", i));
+    await db.insert(dailyRollups).values([...dates.map((date) => day(date, date < "2026-03-09" ? 40 : 10)), day("2026-03-16", 88), day("2026-03-01", 88)]);
+    const note = (at: string) => ({ journalId, kind: "note" as const, at: new Date(at), data: { kind: "note" as const, text: "x" }, createdBy: ownerId, createdAt: BEFORE, updatedAt: BEFORE });
+    await db.insert(entries).values([note("2026-03-08T22:59:00Z"), note("2026-03-08T23:00:00Z"), note("2026-03-09T10:00:00Z"), note("2026-03-15T22:59:00Z"), note("2026-03-15T23:00:00Z")]);
+    await send(ownerId);
+    await send(educatorId);
+    const [own] = await mailsOf(ownerId);
+    expect(own?.text).toContain("Glucose on 7 of 7 days.");
+    expect(own?.text).toContain("Something logged on 2 of 7 days.");
+    expect(own?.text).toContain("69% of readings were in range, 70 (3.9) to 180 (10.0) mg/dL, and 3.5% below 70 (3.9).");
+    const [theirs] = await mailsOf(educatorId);
+    expect(theirs?.text).toContain("Ilka Brandvold: 8.7% of 14 days was below 70 (3.9). The usual aim is under 4%.");
   });
 
   it("goes to nobody who switched it off, is not verified, has no notebook, or came after its moment", async () => {
