@@ -60,7 +60,9 @@ export default async function VersionPage({ params }: Params) {
           </ul>
         </Section>
       ) : null}
-      <Section title="Every setting of this version"><ProfileTable profile={version.profile} unit={header.unit} /></Section>
+      <Section title="Every setting of this version">
+        {isOwner && header.isGateOpen === false && version.approvedHash === null ? <p className="max-w-text">Your educator sees these numbers first. They show here once they are approved.</p> : <ProfileTable profile={version.profile} unit={header.unit} />}
+      </Section>
       {isOwner && version.state === "approved" ? (
         <Section title="Put it into effect"><EffectForm journalId={journalId} number={version.number} contentHash={version.contentHash} now={localOfInstant(now, header.timeZone)} /></Section>
       ) : null}
