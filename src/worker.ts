@@ -1,8 +1,8 @@
 import { randomUUID } from "node:crypto";
 import { setTimeout as wait } from "node:timers/promises";
 import { openPool } from "@/db/client";
-import type { FindingOf } from "@/domain/digest/week";
 import { assertServable, env } from "@/env";
+import { findingSentence } from "@/features/comparison/queries/finding-sentence";
 import { dueReaders } from "@/features/digest/queries/due-readers";
 import { sendDigest } from "@/features/digest/use-cases/send-digest";
 import type { Context } from "@/lib/context";
@@ -28,8 +28,6 @@ const stopping = new AbortController();
 /** A job acts for itself, through the same policy as everybody. */
 const jobContext = (): Context => ({ actor: { type: "job", job: "weekly-digest" }, db, now, requestId: randomUUID() });
 
-const noFinding: FindingOf = () => Promise.resolve(null);
-
 async function deliverUntilStopped(): Promise<void> {
   const send = resendSender();
   const mayStillSend = mailConsent(db, now);
@@ -50,7 +48,7 @@ const stopJobs = await startJobs(env.databaseUrl, {
   dueReaders: () => dueReaders(jobContext()),
   sendDigest: async (userId) => {
     const context = jobContext();
-    const mailId = await sendDigest(context, { userId }, noFinding);
+    const mailId = await sendDigest(context, { userId }, (journalId, number) => findingSentence(context, journalId, number));
     if (mailId) logEvent("info", "digest.written", { userId, mailId, requestId: context.requestId });
   },
 });

@@ -20,3 +20,5 @@ if (!load) {
     process.exitCode = 1;
   }
 }
+
+export {};

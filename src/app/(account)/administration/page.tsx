@@ -3,7 +3,7 @@ import { PressButton } from "@/components/form/press-button";
 import { Empty } from "@/components/notice";
 import { MarginNote, Page, Section } from "@/components/page";
 import { verifyCredentialAction } from "@/features/administration/actions";
-import { serviceHealth } from "@/features/administration/queries/service";
+import { serviceHealth } from "@/features/administration/queries/health";
 import { forPage } from "@/lib/action";
 import { readinessOf } from "@/lib/readiness";
 
