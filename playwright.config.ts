@@ -38,6 +38,7 @@ export default defineConfig({
     locale: "en-GB",
     timezoneId: "Europe/London",
     trace: "retain-on-failure",
+    actionTimeout: 12_000,
     launchOptions: {
       executablePath: process.env.CHROMIUM ?? "/usr/bin/chromium",
       chromiumSandbox: hasSandbox,

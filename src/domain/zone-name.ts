@@ -7,3 +7,8 @@ export function isZone(name: string): boolean {
     return false;
   }
 }
+
+/** The zones to choose from, UTC first; the platform's own list leaves it out. */
+export function zoneNames(): string[] {
+  return ["UTC", ...Intl.supportedValuesOf("timeZone").filter((zone) => zone !== "UTC")];
+}

@@ -42,13 +42,14 @@ export default function BandsChart({
   const none = { pointRadius: 0, spanGaps: false, tension: 0.3 };
   const data: ChartData<"line", (number | null)[], string> = {
     labels: minutes.map(clockText),
+    // The first is drawn on top: lines before bands.
     datasets: [
-      { ...none, label: "after, a quarter lies above", data: pick(after, "p75"), borderWidth: 0, fill: "+1", backgroundColor: colours.band },
-      { ...none, label: "after, a quarter lies below", data: pick(after, "p25"), borderWidth: 0 },
+      { ...none, label: "after, middle", data: pick(after, "p50"), borderColor: colours.ink, borderWidth: 3 },
+      { ...none, label: "before, middle", data: pick(before, "p50"), borderColor: colours.before, borderWidth: 2.5, borderDash: [7, 5] },
       { ...none, label: "before, a quarter lies above", data: pick(before, "p75"), borderColor: colours.before, borderWidth: 1, borderDash: [2, 3] },
       { ...none, label: "before, a quarter lies below", data: pick(before, "p25"), borderColor: colours.before, borderWidth: 1, borderDash: [2, 3] },
-      { ...none, label: "before, middle", data: pick(before, "p50"), borderColor: colours.before, borderWidth: 2.5, borderDash: [7, 5] },
-      { ...none, label: "after, middle", data: pick(after, "p50"), borderColor: colours.ink, borderWidth: 3 },
+      { ...none, label: "after, a quarter lies above", data: pick(after, "p75"), borderWidth: 0, fill: "+1", backgroundColor: colours.band },
+      { ...none, label: "after, a quarter lies below", data: pick(after, "p25"), borderWidth: 0 },
     ],
   };
   const font = { family: getComputedStyle(document.body).fontFamily, size: 14 };

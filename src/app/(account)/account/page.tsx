@@ -9,6 +9,7 @@ import { MailChoices } from "@/features/digest/components/mail-choices";
 import { forPage } from "@/lib/action";
 import { requestContext } from "@/lib/request-context";
 import { listSessions } from "@/lib/session";
+import { zoneNames } from "@/domain/zone-name";
 
 export const metadata: Metadata = { title: "Account" };
 
@@ -19,7 +20,7 @@ export default async function AccountPage() {
   return (
     <Page eyebrow={account.email} title="Your account.">
       <Section title="You">
-        <ProfileForm start={{ displayName: account.displayName, timeZone: account.timeZone, glucoseUnit: account.glucoseUnit }} zones={Intl.supportedValuesOf("timeZone")} />
+        <ProfileForm start={{ displayName: account.displayName, timeZone: account.timeZone, glucoseUnit: account.glucoseUnit }} zones={zoneNames()} />
       </Section>
       <MailChoices />
       <Section title="Where you are signed in">

@@ -4,6 +4,7 @@ import { Page } from "@/components/page";
 import { NewJournalForm } from "@/features/onboarding/components/new-journal-form";
 import { myJournals } from "@/features/onboarding/queries/my-journals";
 import { forPage } from "@/lib/action";
+import { zoneNames } from "@/domain/zone-name";
 
 export const metadata: Metadata = { title: "Start a journal" };
 
@@ -11,7 +12,7 @@ export default async function NewJournalPage() {
   await forPage(myJournals);
   return (
     <Page title="Start a journal." lead={<p>A few words about the setup, then the starting profile, a page at a time. Everything is saved as you go.</p>} margin={<Caution />}>
-      <NewJournalForm zones={Intl.supportedValuesOf("timeZone")} timeZone="Europe/London" />
+      <NewJournalForm zones={zoneNames()} timeZone="Europe/London" />
     </Page>
   );
 }

@@ -9,6 +9,7 @@ import { ImportProgress } from "@/features/glucose/components/import-progress";
 import { UndoForm } from "@/features/glucose/components/undo-form";
 import { importDetail } from "@/features/glucose/queries/imports";
 import { forPage } from "@/lib/action";
+import { zoneNames } from "@/domain/zone-name";
 
 export const metadata: Metadata = { title: "A file" };
 
@@ -63,7 +64,7 @@ export default async function ImportPage({ params }: Readonly<{ params: Promise<
               </table>
             </div>
           </Section>
-          <ImportForm journalId={journalId} importId={importId} preview={preview} zones={Intl.supportedValuesOf("timeZone")} timeZone={journal.timeZone} />
+          <ImportForm journalId={journalId} importId={importId} preview={preview} zones={zoneNames()} timeZone={journal.timeZone} />
         </>
       ) : null}
       {found.status === "done" || isWaiting ? (
