@@ -39,6 +39,7 @@ export default defineConfig({
     timezoneId: "Europe/London",
     trace: "retain-on-failure",
     actionTimeout: 12_000,
+    navigationTimeout: 20_000,
     launchOptions: {
       executablePath: process.env.CHROMIUM ?? "/usr/bin/chromium",
       chromiumSandbox: hasSandbox,

@@ -3,6 +3,7 @@ import { glucoseFile } from "./glucose-file";
 import { linkInLetter } from "./mailbox";
 
 const PASSWORD = "seven quiet boats at dawn";
+const NAME = `Nora ${String(Date.now() % 100_000)}`;
 const ADDRESS = `nora-${Date.now()}@people.example`;
 
 async function signedInAs(browser: Browser, role: "as the educator" | "as the mentor"): Promise<Page> {
@@ -30,7 +31,8 @@ async function invite(page: Page, journal: string, address: string, role: string
 
 async function approve(page: Page): Promise<void> {
   await page.goto("/review");
-  await page.getByRole("link", { name: /Nora/ }).first().click();
+  await page.getByRole("link", { name: NAME }).first().click();
+  await page.waitForURL(/review\/.+/);
   const form = page.locator("form").filter({ has: page.getByRole("button", { name: "Sign and approve" }) });
   for (const box of await form.getByRole("checkbox").all()) await box.check();
   await form.getByLabel("Next review by").fill("2099-01-15");
@@ -48,7 +50,7 @@ test("a person starts, changes one thing, and sees what followed", async ({ page
     await page.goto("/sign-up");
     await page.getByRole("button", { name: "Make an account" }).click();
     await expect(page.getByRole("heading", { name: "There is a problem" })).toBeVisible();
-    await page.getByLabel("Name that others see").fill("Nora Invented");
+    await page.getByLabel("Name that others see").fill(NAME);
     await page.getByLabel("E-mail address").fill(ADDRESS);
     await page.getByLabel("Password").fill(PASSWORD);
     await page.getByLabel("Time zone").selectOption("UTC");
