@@ -68,10 +68,16 @@ export const tick = z
   .union([z.literal("on"), z.literal("true"), z.boolean(), z.literal(""), z.literal("false"), z.undefined()])
   .transform((value) => value === "on" || value === "true" || value === true);
 
+/** What a group of fields with one name sends, as a list: none, one or many. */
+export function asList(given: unknown): unknown[] {
+  if (given === undefined || given === null || given === "" || given === false) return [];
+  return Array.isArray(given) ? (given as unknown[]) : [given];
+}
+
 /** A group of checkboxes: none, one or many values of a list. */
 export function listOf<const T extends readonly [string, ...string[]]>(values: T) {
   return z.preprocess(
-    (given) => (given === undefined || given === null || given === "" || given === false ? [] : Array.isArray(given) ? given : [given]),
+    asList,
     z.array(z.enum(values)),
   );
 }

@@ -91,6 +91,12 @@ function place(values: Record<string, unknown>, keys: string[], value: unknown):
   at[keys[keys.length - 1] ?? ""] = value;
 }
 
+/** One text field of a form; empty when it is absent or a file. */
+export function fieldText(form: FormData, name: string): string {
+  const value = form.get(name);
+  return typeof value === "string" ? value : "";
+}
+
 const SECRET_FIELD = /password|token|secret/i;
 
 function typedText(form: FormData): Record<string, string> {

@@ -17,5 +17,5 @@ export function errorFields(error: unknown): Record<string, string> {
   if (!(error instanceof Error)) return { error: typeof error };
   const cause = error.cause as { code?: unknown } | undefined;
   const frame = error.stack?.split("\n").find((line) => line.includes("/src/")) ?? "";
-  return { error: error.name, code: String(cause?.code ?? ""), frame: frame.trim().replace(/.*\/src\//, "src/") };
+  return { error: error.name, code: typeof cause?.code === "string" ? cause.code : "", frame: frame.trim().replace(/.*\/src\//, "src/") };
 }

@@ -4,7 +4,8 @@ import { stringify } from "csv-stringify/sync";
 
 /** The rows of a CSV file by column name, whatever the order of its columns; blank lines skipped. */
 export function readRows(file: string): Record<string, string>[] {
-  return parse(readFileSync(file), { columns: true, bom: true, skip_empty_lines: true, trim: true }) as Record<string, string>[];
+  const rows: Record<string, string>[] = parse(readFileSync(file), { columns: true, bom: true, skip_empty_lines: true, trim: true });
+  return rows;
 }
 
 /** @throws {Error} naming the column and its value when it is no number */

@@ -1,6 +1,5 @@
 /** Hold an engine against an outside implementation: `npm run --silent verify -- NAME FILES`. */
 const COMMANDS: Record<string, () => Promise<{ run: (args: string[]) => Promise<void> }>> = {
-  metrics: () => import("./metrics"),
   comparison: () => import("./comparison"),
   adjusted: () => import("./adjusted"),
   profile: () => import("./profile"),

@@ -46,7 +46,7 @@ export function ActionForm({
   }, [state, onDone]);
 
   const errorOf = (name: string): string | undefined => {
-    const own = (get(errors, name) as { message?: string; root?: { message?: string } } | undefined);
+    const own: { message?: string; root?: { message?: string } } | undefined = get(errors, name);
     return own?.message ?? own?.root?.message ?? refused?.fields[name]?.[0];
   };
   const items = [...clientItems(errors), ...Object.entries(refused?.fields ?? {}).map(([name, all]) => ({ name, message: all[0] ?? "" }))];
@@ -70,7 +70,7 @@ export function ActionForm({
         onSubmit={(event) => {
           event.preventDefault();
           if (isBusy) return;
-          const submitter = (event.nativeEvent as SubmitEvent).submitter;
+          const submitter = event.nativeEvent.submitter;
           const data = new FormData(event.currentTarget, submitter);
           void form.handleSubmit(() => startTransition(() => dispatch(data)))(event);
         }}

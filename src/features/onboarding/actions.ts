@@ -1,7 +1,7 @@
 "use server";
 
 import { redirect } from "next/navigation";
-import { formValues, toActionResult, type ActionResult } from "@/lib/action";
+import { fieldText, formValues, toActionResult, type ActionResult } from "@/lib/action";
 import type { CreateJournalInput, ProposeStartInput, SaveStepInput } from "./schema";
 import { createJournal } from "./use-cases/create-journal";
 import { proposeStart } from "./use-cases/propose-start";
@@ -19,11 +19,11 @@ export async function saveStepAction(_previous: Previous, form: FormData): Promi
   const result = await toActionResult((ctx) => saveStep(ctx, formValues(form) as SaveStepInput), form);
   if (!result.ok) return result;
   const isChange = form.get("returnTo") === "review";
-  redirect(`/j/${String(form.get("journalId"))}/start/${isChange ? "review" : result.data.next}`);
+  redirect(`/j/${fieldText(form, "journalId")}/start/${isChange ? "review" : result.data.next}`);
 }
 
 export async function proposeStartAction(_previous: Previous, form: FormData): Promise<ActionResult> {
   const result = await toActionResult((ctx) => proposeStart(ctx, formValues(form) as ProposeStartInput), form);
   if (!result.ok) return result;
-  redirect(`/j/${String(form.get("journalId"))}/changes/${result.data.number}`);
+  redirect(`/j/${fieldText(form, "journalId")}/changes/${result.data.number}`);
 }

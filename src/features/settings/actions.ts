@@ -1,7 +1,7 @@
 "use server";
 
 import { redirect } from "next/navigation";
-import { formValues, toActionResult, type ActionResult } from "@/lib/action";
+import { fieldText, formValues, toActionResult, type ActionResult } from "@/lib/action";
 import type { ChangeSettingInput, EffectInput } from "./schema";
 import { changeSetting } from "./use-cases/change-setting";
 import { putIntoEffect } from "./use-cases/put-into-effect";
@@ -11,7 +11,7 @@ import { withdrawVersion } from "./use-cases/withdraw-version";
 type Previous = ActionResult | null;
 type Target = { journalId: string; number: string };
 
-const changesPage = (form: FormData, number: number) => `/j/${String(form.get("journalId"))}/changes/${number}`;
+const changesPage = (form: FormData, number: number) => `/j/${fieldText(form, "journalId")}/changes/${number}`;
 
 export async function changeSettingAction(_previous: Previous, form: FormData): Promise<ActionResult> {
   const result = await toActionResult((ctx) => changeSetting(ctx, formValues(form) as ChangeSettingInput), form);

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { optionalDecimal, timeOfDay } from "@/domain/form-text";
+import { asList, optionalDecimal, timeOfDay } from "@/domain/form-text";
 import { CHANGE_REASON_CODES, needsWords } from "@/domain/settings/change-reason";
 import { EXPECTED_DIRECTIONS, EXPECTED_OUTCOMES, EXPECTED_WINDOWS, expectationSchema } from "@/domain/settings/expectation";
 import { settingsProfileSchema } from "@/domain/settings/profile";
@@ -12,10 +12,7 @@ const isoDay = z.iso.date("Type a date.");
 const emptyToNull = <T extends z.ZodType>(schema: T) => z.union([z.literal("").transform(() => null), z.null(), z.undefined().transform(() => null), schema]);
 
 /** The days that looked like this, as ISO dates: none, one or many. */
-const evidenceDays = z.preprocess(
-  (given) => (given === undefined || given === null || given === "" || given === false ? [] : Array.isArray(given) ? given : [given]),
-  z.array(z.iso.date()).max(60),
-);
+const evidenceDays = z.preprocess(asList, z.array(z.iso.date()).max(60));
 const answers = z.record(z.string().max(40), words(500)).default({});
 const contentHash = z.string().regex(/^[0-9a-f]{64}$/);
 

@@ -13,7 +13,7 @@ function read(bytes: Uint8Array, choice: Partial<CsvMapping> = {}) {
   const mapping = mappingOf(preview, choice);
   const mapper = new RowMapper(mapping);
   const text = new TextDecoder(mapping.encoding).decode(bytes);
-  const rows = parse(text, { ...PARSER_OPTIONS, delimiter: mapping.delimiter, from_line: 1 }) as string[][];
+  const rows: string[][] = parse(text, { ...PARSER_OPTIONS, delimiter: mapping.delimiter });
   const outcomes = rows.slice(mapping.headerRow + 1).map((row, i) => mapper.map(row, i + 1));
   return { preview, outcomes, readings: outcomes.flatMap((o): MappedReading[] => ("reading" in o ? [o.reading] : [])) };
 }

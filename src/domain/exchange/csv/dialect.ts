@@ -10,7 +10,8 @@ export const PARSER_OPTIONS = { relax_quotes: true, relax_column_count: true, sk
 
 function rowsWith(text: string, delimiter: Delimiter): string[][] {
   try {
-    return parse(text, { ...PARSER_OPTIONS, delimiter, to: LINES }) as string[][];
+    const rows: string[][] = parse(text, { ...PARSER_OPTIONS, delimiter, to: LINES });
+    return rows;
   } catch {
     return [];
   }

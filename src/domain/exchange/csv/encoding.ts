@@ -14,7 +14,9 @@ export function guessEncoding(bytes: Uint8Array): Encoding {
   let even = 0;
   let odd = 0;
   sample.forEach((byte, i) => {
-    if (byte === 0) i % 2 === 0 ? (even += 1) : (odd += 1);
+    if (byte !== 0) return;
+    if (i % 2 === 0) even += 1;
+    else odd += 1;
   });
   if (odd > sample.length / 5) return "utf-16le";
   if (even > sample.length / 5) return "utf-16be";

@@ -55,7 +55,8 @@ export default async function WizardPage({ params, searchParams }: Props) {
 function Fields({ view, rows }: Readonly<{ view: WizardView; rows: number }>) {
   const unit = view.journal.glucoseUnit;
   const working = (name: string) => {
-    const blocks = readBlocks(typeof view.answers["about-you"]?.[name] === "string" ? (view.answers["about-you"][name] as string) : "");
+    const typed = view.answers["about-you"]?.[name];
+    const blocks = readBlocks(typeof typed === "string" ? typed : "");
     return typeof blocks === "string" ? null : blocks;
   };
   switch (view.step) {
