@@ -18,19 +18,6 @@ import { reviewPageInput } from "../schema";
 
 const DATA_DAYS = 14;
 
-/** The last days' figures, with how much of them there is. */
-async function lastDays(ctx: Context, journalId: string, zone: string) {
-  const today = dayNumberOf(isoDayOf(ctx.now(), zone));
-  const rows = await listRollups(ctx.db, journalId, "day", today - DATA_DAYS, today - 1);
-  const readings = rows.reduce((sum, r) => sum + r.readings, 0);
-  const share = (bands: number[]) => (readings === 0 ? null : rows.reduce((sum, r) => sum + bands.reduce((s, b) => s + (r.bandCounts[b] ?? 0), 0), 0) / readings);
-  return {
-    days: rows.filter((r) => activeFraction(r) >= 0.7).length,
-    meanMgDl: readings === 0 ? null : rows.reduce((sum, r) => sum + r.sumMgDl, 0) / readings,
-    inRangeFraction: share([2]), below70Fraction: share([0, 1]), below54Fraction: share([0]),
-  };
-}
-
 /** Proposals that wait for this educator, longest first, with lows and gate reasons marked. */
 export async function reviewQueue(ctx: Context) {
   authorize(ctx.actor, "review.list");
@@ -74,3 +61,16 @@ export async function reviewPage(ctx: Context, input: { journalId: string; numbe
 }
 
 export type ReviewView = Awaited<ReturnType<typeof reviewPage>>;
+
+/** The last days' figures, with how much of them there is. */
+async function lastDays(ctx: Context, journalId: string, zone: string) {
+  const today = dayNumberOf(isoDayOf(ctx.now(), zone));
+  const rows = await listRollups(ctx.db, journalId, "day", today - DATA_DAYS, today - 1);
+  const readings = rows.reduce((sum, r) => sum + r.readings, 0);
+  const share = (bands: number[]) => (readings === 0 ? null : rows.reduce((sum, r) => sum + bands.reduce((s, b) => s + (r.bandCounts[b] ?? 0), 0), 0) / readings);
+  return {
+    days: rows.filter((r) => activeFraction(r) >= 0.7).length,
+    meanMgDl: readings === 0 ? null : rows.reduce((sum, r) => sum + r.sumMgDl, 0) / readings,
+    inRangeFraction: share([2]), below70Fraction: share([0, 1]), below54Fraction: share([0]),
+  };
+}
