@@ -55,7 +55,10 @@ export function decimal(bounds: Bounds) {
 
 /** A typed decimal that may be left empty: null then. */
 export function optionalDecimal(bounds: Bounds) {
-  return z.union([z.literal("").transform(() => null), z.null(), z.undefined().transform(() => null), decimal(bounds)]);
+  return z
+    .union([z.literal("").transform(() => null), decimal(bounds)])
+    .nullish()
+    .transform((value) => value ?? null);
 }
 
 /** A typed whole number within bounds, both included. */
@@ -65,7 +68,8 @@ export function wholeNumber(bounds: Bounds) {
 
 /** A checkbox: present is yes. */
 export const tick = z
-  .union([z.literal("on"), z.literal("true"), z.boolean(), z.literal(""), z.literal("false"), z.undefined()])
+  .union([z.literal("on"), z.literal("true"), z.boolean(), z.literal(""), z.literal("false")])
+  .optional()
   .transform((value) => value === "on" || value === "true" || value === true);
 
 /** What a group of fields with one name sends, as a list: none, one or many. */

@@ -9,7 +9,8 @@ const versionNumber = z.coerce.number().int().min(1).max(100_000);
 const words = (longest: number) => z.string().trim().max(longest, `At most ${longest} characters.`);
 const codes = <Code extends string>(list: Record<Code, string>) => Object.keys(list) as [Code, ...Code[]];
 const isoDay = z.iso.date("Type a date.");
-const emptyToNull = <T extends z.ZodType>(schema: T) => z.union([z.literal("").transform(() => null), z.null(), z.undefined().transform(() => null), schema]);
+const emptyToNull = <T extends z.ZodType>(schema: T) =>
+  z.union([z.literal("").transform(() => null), schema]).nullish().transform((value) => value ?? null);
 
 /** The days that looked like this, as ISO dates: none, one or many. */
 const evidenceDays = z.preprocess(asList, z.array(z.iso.date()).max(60));
