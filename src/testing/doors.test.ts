@@ -56,7 +56,7 @@ describe("every door has the same lock", () => {
     const door = DOORS[name];
     if (!door) throw new Error(`no row for ${name}`);
     const knock = (sample: Readonly<Record<string, string>> = door.sample) => action(null, formOf(sample, journal.journalId));
-    const refused = (code: string) => expect.objectContaining({ ok: false, code });
+    const refused = (code: string): unknown => expect.objectContaining({ ok: false, code });
 
     if (door.opensTo !== "anyone") expect(await knock()).toEqual(refused("UNAUTHENTICATED"));
     if (door.opensTo === "journal") {
