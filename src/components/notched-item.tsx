@@ -3,10 +3,10 @@ import type { ReactNode } from "react";
 type Notch = "in-effect" | "past" | "waiting" | "fallback";
 
 const LOOK: Readonly<Record<Notch, string>> = {
-  "in-effect": "w-7 border-t-[4px] border-solid",
-  past: "w-6 border-t-[2px] border-solid",
-  waiting: "w-6 border-t-[2px] border-dashed",
-  fallback: "w-3.5 border-t-[2px] border-solid",
+  "in-effect": "w-3.5 border-t-[4px] border-solid desk:w-7",
+  past: "w-3 border-t-[2px] border-solid desk:w-6",
+  waiting: "w-3 border-t-[2px] border-dashed desk:w-6",
+  fallback: "w-2 border-t-[2px] border-solid desk:w-3.5",
 };
 
 /** One place on the rule: its number left of the rule, its notch on it, what hangs off it at the right. */

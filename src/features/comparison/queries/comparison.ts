@@ -5,6 +5,7 @@ import { listReadings } from "@/db/repositories/readings";
 import { listVersions } from "@/db/repositories/versions";
 import { authorize } from "@/domain/access/policy";
 import { describeFinding } from "@/domain/comparison/finding";
+import type { OutcomeId } from "@/domain/comparison/outcomes";
 import { timeOfDayBands } from "@/domain/comparison/time-of-day";
 import { civilOf } from "@/domain/civil-time";
 import { dayStart } from "@/domain/day-start";
@@ -30,6 +31,7 @@ export async function comparisonOf(ctx: Context, input: { journalId: string; num
   const { comparison, version, parent, data } = compared;
   await recordRead(ctx, journalId, `comparison of version ${number}`);
   const { sides } = comparison;
+  const shownOutcome: OutcomeId = comparison.verdict === "more-lows" ? "day-lows" : comparison.outcome;
   const firstShown = Math.max(sides.before.first, comparison.days.changeDay - 29);
   const flags = await listDayFlags(ctx.db, journalId, firstShown, comparison.days.lastDay);
   return {
@@ -37,7 +39,10 @@ export async function comparisonOf(ctx: Context, input: { journalId: string; num
     finding: describeFinding(comparison, journal.glucoseUnit),
     lines: differenceLines(profileDifference(parent.profile, version.profile), journal.glucoseUnit),
     bands: await bands(ctx, journal, comparison),
-    series: data.series[comparison.outcome].filter(({ day }) => day >= firstShown && day <= comparison.days.lastDay),
+    shownOutcome,
+    /** Clean days after, of what is shown. */
+    cleanAfter: shownOutcome === "day-lows" ? (comparison.lows.effect?.nAfter ?? 0) : comparison.after.length,
+    series: data.series[shownOutcome].filter(({ day }) => day >= firstShown && day <= comparison.days.lastDay),
     flags: flags.map((flag) => ({ label: DAY_FLAGS[flag.code].label, firstDay: flag.firstDay, lastDay: flag.lastDay, note: flag.note })),
     comparable: livedVersions(versions, journal.timeZone).slice(1).map(({ version: v }) => v.number).toReversed(),
   };

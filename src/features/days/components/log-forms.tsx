@@ -68,9 +68,9 @@ export function LogForms({ journalId, now, today }: Readonly<{ journalId: string
     },
   ];
   return (
-    <div className="mt-6 grid gap-3 desk:grid-cols-5 desk:items-start">
+    <div className="mt-6 grid grid-cols-2 items-start gap-3 desk:grid-cols-5">
       {forms.map(({ title, form }) => (
-        <details key={title} name="log" className="group open:desk:col-span-5">
+        <details key={title} name="log" className="group open:col-span-2 open:desk:col-span-5">
           <summary className="button button-other w-full list-none group-open:mb-1">{title}</summary>
           {form}
         </details>

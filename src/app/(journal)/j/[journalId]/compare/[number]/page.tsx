@@ -31,14 +31,14 @@ export default async function ComparisonPage({ params }: Params) {
   const { comparison, finding, journal, bands } = view;
   const unit = journal.glucoseUnit;
   const lens = lensFigures(comparison, unit);
-  const isGlucose = OUTCOMES[comparison.outcome].unit === "mg/dL";
+  const isGlucose = OUTCOMES[view.shownOutcome].unit === "mg/dL";
   const inUnit = (mgDl: number) => (unit === "mg/dL" ? Math.round(mgDl) : Math.round(mgDlToMmol(mgDl) * 10) / 10);
   const shownBands = (side: typeof bands.before) => side.map((b) => ({ ...b, p25: inUnit(b.p25), p50: inUnit(b.p50), p75: inUnit(b.p75) }));
   const isLows = comparison.verdict === "more-lows";
-  const daysWord = OUTCOMES[comparison.outcome].days === "nights" ? "night" : "day";
+  const daysWord = OUTCOMES[view.shownOutcome].days === "nights" ? "night" : "day";
   return (
     <Page
-      eyebrow={`Version ${comparison.version} against version ${comparison.against} · ${comparison.attribution === "bundle" ? "several settings changed" : "one setting changed"} · looked at after ${counted(comparison.after.length, `clean ${daysWord}`)}`}
+      eyebrow={`Version ${comparison.version} against version ${comparison.against} · ${comparison.attribution === "bundle" ? "several settings changed" : "one setting changed"} · looked at after ${counted(view.cleanAfter, `clean ${daysWord}`)}`}
       title={isLows ? `▼ ${finding.title}` : finding.title}
       lead={
         <>
@@ -55,7 +55,7 @@ export default async function ComparisonPage({ params }: Params) {
           <Bands
             before={shownBands(bands.before)}
             after={shownBands(bands.after)}
-            governed={GOVERNED_MINUTES[comparison.outcome]}
+            governed={GOVERNED_MINUTES[view.shownOutcome]}
             thresholds={unit === "mg/dL" ? { low: 70, high: 180 } : { low: 3.9, high: 10 }}
             unit={unit}
             label={`Glucose by time of day, before and after version ${comparison.version}; the middle half of readings as a band, the middle as a line. The table below has the same figures.`}
@@ -64,12 +64,12 @@ export default async function ComparisonPage({ params }: Params) {
         </Section>
       ) : null}
       {view.series.length > 0 ? (
-        <Section title={STRIP_TITLES[comparison.outcome]}>
+        <Section title={STRIP_TITLES[view.shownOutcome]}>
           <DayStrip
             days={view.series}
             changeDay={comparison.days.changeDay}
-            label={`${STRIP_TITLES[comparison.outcome]}: one mark for each ${daysWord}, hollow before and filled after version ${comparison.version}`}
-            unitLabel={isGlucose ? unit : STRIP_UNITS[comparison.outcome]}
+            label={`${STRIP_TITLES[view.shownOutcome]}: one mark for each ${daysWord}, hollow before and filled after version ${comparison.version}`}
+            unitLabel={isGlucose ? unit : STRIP_UNITS[view.shownOutcome]}
             format={(v) => (isGlucose ? glucoseNumber(v, unit) : `${Math.round(v)}%`)}
           />
         </Section>
