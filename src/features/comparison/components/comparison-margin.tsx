@@ -10,7 +10,8 @@ const dayText = (day: number) => isoDayText(isoDayOfNumber(day));
 /** What changed, what was used, how it was worked out, caution. */
 export function ComparisonMargin({ view, journalId }: Readonly<{ view: ComparisonView; journalId: string }>) {
   const { comparison, version, lines, journal } = view;
-  const { days } = OUTCOMES[comparison.outcome];
+  const { days } = OUTCOMES[view.shownOutcome];
+  const used = view.shownOutcome === "day-lows" && comparison.lows.effect ? comparison.lows.effect : { nBefore: comparison.before.length, nAfter: comparison.after.length };
   return (
     <>
       <MarginNote title="The change">
@@ -20,7 +21,7 @@ export function ComparisonMargin({ view, journalId }: Readonly<{ view: Compariso
       </MarginNote>
       <MarginNote title={`${days === "nights" ? "Nights" : "Days"} used`}>
         <p>
-          {comparison.before.length} before, {comparison.after.length} after. Left out always: the day of the change and the day before it.
+          {used.nBefore} before, {used.nAfter} after. Left out always: the day of the change and the day before it.
           {comparison.leftOut.length > 0 ? ` Also left out: ${comparison.leftOut.map((d) => `${dayText(d.day)} (${d.leftOutReason ?? ""})`).join(", ")}.` : ""}
         </p>
       </MarginNote>
