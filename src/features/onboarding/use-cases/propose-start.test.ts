@@ -12,6 +12,7 @@ import { contextFor, createHelper, createJournal, strangerContext, TEST_NOW } fr
 import { createTestDb } from "@/testing/test-database";
 import { proposeStart } from "./propose-start";
 
+const FIRST_ROW_VERSION = 1;
 const allNo = Object.fromEntries(Object.keys(GATE_QUESTIONS).map((question) => [question, "no"]));
 const complete: DraftAnswers = {
   "about-you": { weightKg: "70", ageYears: "34", totalDailyDoseUnits: "40", hypoProne: "no", largestMealBolusUnits: "" },
@@ -29,7 +30,7 @@ describe("proposeStart", () => {
     const { journalId, ownerId } = await createJournal(db, { gateReasons: null });
     await insertDraft(db, { journalId, updatedAt: TEST_NOW, updatedBy: ownerId });
     const save = (mended: DraftAnswers, since: number) => updateDraft(db, { journalId, answers: mended, rowVersion: since, updatedAt: TEST_NOW, updatedBy: ownerId });
-    const rowVersion = (await save(answers, 0)) ?? (await save(answers, 1));
+    const rowVersion = await save(answers, FIRST_ROW_VERSION);
     if (rowVersion === null) throw new Error("the draft was not saved");
     return { journalId, ownerId, rowVersion, save, ctx: await contextFor(db, ownerId), input: { journalId, rowVersion } };
   }
