@@ -1,0 +1,70 @@
+import { beforeAll, describe, expect, it } from "vitest";
+import type { Pool } from "@/db/client";
+import { listVersions, moveVersion } from "@/db/repositories/versions";
+import { contextFor, createHelper, createJournal, strangerContext, TEST_NOW } from "@/testing/factories";
+import { createTestDb } from "@/testing/test-database";
+import { createVersion } from "@/testing/version-factory";
+import { returnToVersion } from "./return-to-version";
+
+const DAY_MS = 86_400_000;
+const daysAgo = (days: number) => new Date(TEST_NOW.getTime() - days * DAY_MS);
+
+describe("returnToVersion", () => {
+  let db: Pool;
+  beforeAll(async () => {
+    db = await createTestDb();
+  });
+
+  /** Version 1 was superseded by version 2 yesterday. */
+  async function twice(gateReasons: string[] | null = []) {
+    const { journalId, ownerId } = await createJournal(db, { gateReasons });
+    await createVersion(db, { journalId, authorId: ownerId, number: 1, at: daysAgo(10), basalMilliUnitsPerHour: 500 });
+    await moveVersion(db, { journalId, number: 1, from: "in-effect", to: "superseded", at: daysAgo(1) }, { effectiveUntil: daysAgo(1) });
+    await createVersion(db, { journalId, authorId: ownerId, number: 2, at: daysAgo(1), basalMilliUnitsPerHour: 1000 });
+    return { journalId, ownerId, ctx: await contextFor(db, ownerId) };
+  }
+
+  const states = async (journalId: string) => (await listVersions(db, journalId)).map((v) => [v.number, v.state]);
+
+  it("goes back at once where the gate is open, however soon and large the step", async () => {
+    const { journalId, ctx } = await twice();
+    expect(await returnToVersion(ctx, { journalId, number: "1", reasonText: "Two lows last night." })).toEqual({ number: 3, state: "in-effect" });
+    expect(await listVersions(db, journalId)).toMatchObject([
+      { number: 3, state: "in-effect", kind: "undo", parentNumber: 2, reasonCode: "undo", reasonText: "Two lows last night.", profile: { basal: [{ milliUnitsPerHour: 500 }] } },
+      { number: 2, state: "superseded", effectiveUntil: TEST_NOW },
+      { number: 1, state: "superseded" },
+    ]);
+  });
+
+  it.each([[["A first pump."]], [null]])("asks the educator where the gate is not open (%j)", async (gateReasons) => {
+    const { journalId, ctx } = await twice(gateReasons);
+    expect(await returnToVersion(ctx, { journalId, number: 1 })).toEqual({ number: 3, state: "proposed" });
+    expect(await states(journalId)).toEqual([[3, "proposed"], [2, "in-effect"], [1, "superseded"]]);
+  });
+
+  it("goes back once on a double press", async () => {
+    const { journalId, ctx } = await twice();
+    const presses = await Promise.allSettled(Array.from({ length: 5 }, () => returnToVersion(ctx, { journalId, number: 1 })));
+    expect(presses.filter((p) => p.status === "fulfilled")).toHaveLength(1);
+    for (const p of presses) if (p.status === "rejected") expect(p.reason).toMatchObject({ code: "CONFLICT" });
+    expect(await states(journalId)).toEqual([[3, "in-effect"], [2, "superseded"], [1, "superseded"]]);
+  });
+
+  it("refuses the version in effect, one that never was, and one that is not there", async () => {
+    const { journalId, ownerId, ctx } = await twice();
+    await createVersion(db, { journalId, authorId: ownerId, number: 3, state: "declined" });
+    await expect(returnToVersion(ctx, { journalId, number: 2 })).rejects.toMatchObject({ code: "CONFLICT" });
+    await expect(returnToVersion(ctx, { journalId, number: 3 })).rejects.toMatchObject({ code: "CONFLICT" });
+    await expect(returnToVersion(ctx, { journalId, number: 9 })).rejects.toMatchObject({ code: "NOT_FOUND" });
+    await expect(returnToVersion(ctx, { journalId, number: 0 })).rejects.toMatchObject({ issues: [expect.objectContaining({ path: ["number"] })] });
+    expect(await states(journalId)).toEqual([[3, "declined"], [2, "in-effect"], [1, "superseded"]]);
+  });
+
+  it.each(["mentor", "educator", "family"] as const)("refuses a %s, and hides from a stranger", async (role) => {
+    const { journalId, ownerId } = await twice();
+    const helper = await contextFor(db, await createHelper(db, { journalId, ownerId, role }));
+    await expect(returnToVersion(helper, { journalId, number: 1 })).rejects.toMatchObject({ code: "FORBIDDEN" });
+    await expect(returnToVersion(await strangerContext(db), { journalId, number: 1 })).rejects.toMatchObject({ code: "NOT_FOUND" });
+    expect(await states(journalId)).toEqual([[2, "in-effect"], [1, "superseded"]]);
+  });
+});
