@@ -15,7 +15,7 @@ import { contextFor, createJournal } from "@/testing/factories";
 const [kills = 20, seed = 7] = process.argv.slice(2).map(Number);
 const DAYS = 60;
 const ROWS = DAYS * 288;
-const LONGEST_WAIT_MS = 1500;
+const LONGEST_WAIT_MS = 4000;
 
 const text = ["time,glucose mg/dL", ...Array.from({ length: ROWS }, (_, i) => `${new Date(Date.UTC(2026, 0, 1) + i * 300_000).toISOString()},${90 + (i % 90)}`)].join("\n");
 

@@ -81,6 +81,16 @@ describe("putIntoEffect", () => {
     expect(await states(journalId)).toEqual([[2, "approved"], [1, "in-effect"]]);
   });
 
+  it.each([
+    ["skips", "2026-03-29T02:30", "2026-03-29T09:00:00Z"],
+    ["shows twice", "2026-10-25T02:30", "2026-10-25T09:00:00Z"],
+  ])("refuses an hour that the clock %s", async (_what, effectiveFrom, now) => {
+    const at = new Date(now);
+    const { journalId, ownerId, input } = await approved({ approvedDaysAgo: 1 + (TEST_NOW.getTime() - at.getTime()) / DAY_MS });
+    await expect(putIntoEffect(await contextFor(db, ownerId, at), { ...input, effectiveFrom })).rejects.toMatchObject({ fields: { effectiveFrom: [expect.stringContaining("clock")] } });
+    expect(await states(journalId)).toEqual([[1, "approved"]]);
+  });
+
   it("refuses content other than what was shown or approved", async () => {
     const shown = await approved();
     await expect(putIntoEffect(shown.ctx, { ...shown.input, contentHash: "b".repeat(64) })).rejects.toMatchObject({ code: "STALE" });
