@@ -67,7 +67,7 @@ describe("every door has the same lock", () => {
       enter(await contextFor(db, await createPerson(db)));
       expect(await knock()).toEqual(refused("FORBIDDEN"));
     }
-    if (door.weak) {
+    if (door.weak && door.weak !== "none") {
       const { weak } = door;
       enter(await contextFor(db, weak === "person" ? journal.ownerId : await createHelper(db, { ...journal, role: weak })));
       expect(await knock()).toEqual(refused("FORBIDDEN"));
@@ -77,7 +77,7 @@ describe("every door has the same lock", () => {
       enter(await contextFor(db, journal.ownerId));
       const answer = await knock({ ...door.sample, [field]: value });
       expect(answer).toEqual(refused("INVALID_INPUT"));
-      expect(Object.keys(answer.ok ? {} : answer.fields).length).toBeGreaterThan(0);
+      expect(Object.keys(answer.ok ? {} : answer.fields)).toContain(field);
     }
   });
 });

@@ -7,8 +7,8 @@ type Door = Readonly<{
   sample: Readonly<Record<string, string>>;
   /** The field that is spoilt, and by what; null where a body carries nothing. */
   spoilt: readonly [string, string] | null;
-  /** A role in the journal that is too weak; for a journal's doors. */
-  weak?: "mentor" | "educator" | "family" | "person";
+  /** A role in the journal that is too weak, "none" where all of the circle may; for a journal's doors. */
+  weak?: "mentor" | "educator" | "family" | "person" | "none";
 }>;
 
 const J = "JOURNAL";
@@ -73,6 +73,6 @@ export const DOORS: Readonly<Record<string, Door>> = {
   limitHelperAction: owner({ userId: ID, scopes: "glucose", until: "" }, ["userId", "x"]),
   removeHelperAction: owner({ userId: ID }, ["userId", "x"]),
   leaveCircleAction: owner({}, ["journalId", "x"], "person"),
-  addCommentAction: { ...owner({ subject: "version", subjectKey: "1", kind: "comment", body: "hello" }, ["body", ""]), weak: undefined },
-  markCommentsReadAction: { ...owner({ readUpTo: "2026-03-10T08:00:00Z" }, ["readUpTo", "x"]), weak: undefined },
+  addCommentAction: owner({ subject: "version", subjectKey: "1", kind: "comment", body: "hello" }, ["body", ""], "none"),
+  markCommentsReadAction: owner({ readUpTo: "2026-03-10T08:00:00Z" }, ["readUpTo", "x"], "none"),
 };
