@@ -16,6 +16,8 @@ export function plainDigits(typed: string): string {
     .replace(/\s+/gu, "");
 }
 
+const EMPTY = "Type a number.";
+
 /**
  * A decimal number as people write one: "5,6", "5.6", " 5.6 U/h", full-width
  * digits. A unit behind the number is dropped; "1,234" is refused, since it may
@@ -25,7 +27,7 @@ export function plainDigits(typed: string): string {
  */
 export function readDecimal(typed: string): number | string {
   const text = plainDigits(typed).replace(/[\p{L}%/()²·]+$/u, "").replace(/[\p{L}]+\/[\p{L}]*$/u, "");
-  if (text === "") return "Type a number.";
+  if (text === "") return EMPTY;
   if (/^-?\d{1,3},\d{3}$/.test(text) && !/^-?0,/.test(text)) return "Write this without a comma, or with a point: it can be read in two ways.";
   if (!/^-?\d+([.,]\d+)?$/.test(text)) return "Type one number, such as 0.5 or 12.";
   return Number(text.replace(",", "."));
@@ -42,7 +44,8 @@ export function decimal(bounds: Bounds) {
   return z.union([z.string(), z.number()]).transform((typed, ctx) => {
     const value = typeof typed === "number" ? typed : readDecimal(typed);
     if (typeof value === "string") {
-      ctx.addIssue({ code: "custom", message: value });
+      const of = bounds.unit ? `, in ${bounds.unit}` : "";
+      ctx.addIssue({ code: "custom", message: value === EMPTY ? `Type a number${of}.` : value.replace(/\.$/, `${of}.`) });
       return z.NEVER;
     }
     if (!Number.isFinite(value) || value < bounds.min || value > bounds.max) {

@@ -85,6 +85,18 @@ function Fields({ view, rows }: Readonly<{ view: WizardView; rows: number }>) {
   }
 }
 
+/** Working settings of a pump go over as they are; the arithmetic only stands beside them. */
+function CarriedOver({ view }: Readonly<{ view: WizardView }>) {
+  const section = view.step === "basal" ? view.arithmetic?.basal : view.step === "carb-ratio" ? view.arithmetic?.carbRatio : view.arithmetic?.sensitivity;
+  const unit = view.step === "basal" ? "U/h" : view.step === "carb-ratio" ? "g/U" : "mg/dL per U";
+  return (
+    <p>
+      Your working settings are carried over unchanged.
+      {section?.spread ? ` Published rules would range from ${n(section.spread.standard.low)} to ${n(section.spread.standard.high)} ${unit} for your daily dose.` : ""}
+    </p>
+  );
+}
+
 const n = (value: number) => String(Number(value.toFixed(2)));
 
 /** The page's first sentence: the arithmetic in words, with the spread, never one bare number. */
@@ -93,8 +105,9 @@ function Lead({ view }: Readonly<{ view: WizardView }>) {
   if (view.isGateOpen === false && ["basal", "carb-ratio", "sensitivity", "targets", "margin"].includes(step)) {
     return <p>Your educator sees the arithmetic here. You can write down numbers you know already, or leave this page as it is.</p>;
   }
+  if (a?.route === "pump" && ["basal", "carb-ratio", "sensitivity"].includes(step)) return <CarriedOver view={view} />;
   if (step === "basal" && a?.basal.spread && a.basal.exact) {
-    return <p>Published rules give your day between {n(a.basal.spread.cautious.low)} and {n(a.basal.spread.cautious.high)} units of basal. The cautious start takes 40% of {n(a.totalDailyDose.cautious ?? 0)} U: {n(a.basal.exact.cautious)} U/h, rounded to the weaker side: {n(a.basal.cautious ?? 0)}.</p>;
+    return <p>Published rules give between {n(a.basal.spread.cautious.low)} and {n(a.basal.spread.cautious.high)} U/h around the clock. The cautious start takes 40% of {n(a.totalDailyDose.cautious ?? 0)} U: {n(a.basal.exact.cautious)} U/h, rounded to the weaker side: {n(a.basal.cautious ?? 0)}.</p>;
   }
   if (step === "carb-ratio" && a?.carbRatio.spread && a.carbRatio.exact) {
     return <p>Published rules range from {n(a.carbRatio.spread.cautious.low)} to {n(a.carbRatio.spread.cautious.high)} g per unit. The 500 rule gives {n(a.carbRatio.exact.cautious)} for {n(a.totalDailyDose.cautious ?? 0)} U a day, rounded to the weaker side: {n(a.carbRatio.cautious ?? 0)}.</p>;
