@@ -83,4 +83,4 @@ export const effectInput = z.object({
 });
 export type EffectInput = z.input<typeof effectInput>;
 
-export const returnToInput = z.object({ journalId, number: versionNumber, reasonText: words(2000).default("") });
+export const returnToInput = z.object({ journalId, number: versionNumber, reasonText: words(2000).default(""), answers });

@@ -3,15 +3,14 @@
 import { ActionForm } from "@/components/form/action-form";
 import { ChoiceField, TicksField } from "@/components/form/choices";
 import { SelectField, TextArea, TextField } from "@/components/form/fields";
-import { useFormContext } from "@/components/form/form-state";
 import { Button } from "@/components/button";
 import { CHANGE_REASONS } from "@/domain/settings/change-reason";
 import { EXPECTED_DIRECTIONS, EXPECTED_OUTCOMES, EXPECTED_WINDOWS } from "@/domain/settings/expectation";
-import { GUARDRAILS } from "@/domain/settings/guardrail-table";
 import type { GlucoseUnit } from "@/domain/units";
 import { changeSettingAction } from "../actions";
 import { CHANGEABLE_SETTINGS, REVERT_RULES } from "../constants";
 import { changeSettingInput } from "../schema";
+import { GuardrailAnswers } from "./guardrail-answers";
 
 const options = (list: Readonly<Record<string, string>>) => Object.entries(list).map(([value, label]) => ({ value, label }));
 const choose = (list: Readonly<Record<string, string>>) => [{ value: "", label: "Choose …" }, ...options(list)];
@@ -57,11 +56,4 @@ export function ChangeForm({
       <GuardrailAnswers />
     </ActionForm>
   );
-}
-
-/** A place to answer each guardrail that asked; none is shown before one does. */
-function GuardrailAnswers() {
-  const { errorOf, startOf } = useFormContext();
-  const asked = Object.keys(GUARDRAILS).filter((code) => errorOf(`answers.${code}`) ?? startOf(`answers.${code}`));
-  return asked.map((code) => <TextArea key={code} name={`answers.${code}`} label="Before this goes on, say in a few words" rows={2} />);
 }

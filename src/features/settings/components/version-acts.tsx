@@ -3,6 +3,7 @@
 import { ActionForm } from "@/components/form/action-form";
 import { TextField } from "@/components/form/fields";
 import { putIntoEffectAction, returnToVersionAction, withdrawVersionAction } from "../actions";
+import { GuardrailAnswers } from "./guardrail-answers";
 import { effectInput, returnToInput, versionInput } from "../schema";
 
 type Target = Readonly<{ journalId: string; number: number }>;
@@ -35,6 +36,7 @@ export function ReturnForm({ journalId, number, mayRecord }: Target & Readonly<{
       hidden={{ journalId, number: String(number) }}
     >
       <TextField name="reasonText" label="Why?" isOptional />
+      <GuardrailAnswers />
     </ActionForm>
   );
 }

@@ -1,5 +1,6 @@
 import { beforeAll, describe, expect, it } from "vitest";
 import type { Pool } from "@/db/client";
+import { insertEntry } from "@/db/repositories/entries";
 import { listVersions, moveVersion } from "@/db/repositories/versions";
 import { contextFor, createHelper, createJournal, strangerContext, TEST_NOW } from "@/testing/factories";
 import { createTestDb } from "@/testing/test-database";
@@ -40,6 +41,17 @@ describe("returnToVersion", () => {
     const { journalId, ctx } = await twice(gateReasons);
     expect(await returnToVersion(ctx, { journalId, number: 1 })).toEqual({ number: 3, state: "proposed" });
     expect(await states(journalId)).toEqual([[3, "proposed"], [2, "in-effect"], [1, "superseded"]]);
+  });
+
+  it("asks first where ketones were noted and insulin would be less, and keeps the answer", async () => {
+    const { journalId, ownerId, ctx } = await twice();
+    await insertEntry(db, { journalId, kind: "ketones", at: daysAgo(0.2), data: { kind: "ketones", ketonesMicroMolPerL: 1800 }, createdBy: ownerId, createdAt: daysAgo(0.2), updatedAt: daysAgo(0.2) });
+    await expect(returnToVersion(ctx, { journalId, number: 1 })).rejects.toMatchObject({ code: "INVALID_INPUT", fields: { "answers.weaker-and-ketones": [expect.stringContaining("sick-day plan")] } });
+    expect(await states(journalId)).toEqual([[2, "in-effect"], [1, "superseded"]]);
+    await returnToVersion(ctx, { journalId, number: 1, answers: { "weaker-and-ketones": "My educator is on the phone." } });
+    const [back] = await listVersions(db, journalId);
+    expect(back).toMatchObject({ number: 3, state: "in-effect" });
+    expect(back?.guardrails).toContainEqual(expect.objectContaining({ code: "weaker-and-ketones", answer: "My educator is on the phone." }));
   });
 
   it("goes back once on a double press", async () => {
