@@ -44,6 +44,9 @@ export const DAY_FLAGS = {
 
 export type DayFlagCode = keyof typeof DAY_FLAGS;
 
+/** How many days beyond its own ends a flag may leave out, at most: how far around a span to look for flags. */
+export const FLAG_REACH_DAYS = Math.max(...Object.values<DayFlag>(DAY_FLAGS).flatMap(({ daysBefore, daysAfter }) => [daysBefore, daysAfter]));
+
 export const DAY_FLAG_CODES = Object.keys(DAY_FLAGS) as DayFlagCode[];
 
 /**

@@ -15,7 +15,7 @@ import { MEAL_STARTS } from "@/domain/comparison/governed-parts";
 import type { OutcomeId } from "@/domain/comparison/outcomes";
 import { dayStart } from "@/domain/day-start";
 import { isoDayOfNumber } from "@/domain/iso-day";
-import { DAY_FLAGS, daysLeftOut } from "@/domain/journal/day-flag";
+import { DAY_FLAGS, daysLeftOut, FLAG_REACH_DAYS } from "@/domain/journal/day-flag";
 
 const WHOLE_LOG_FRACTION = 0.95;
 const NIGHT_MINUTES = 360;
@@ -41,7 +41,7 @@ export async function dayData(
   const [days, nights, flags, insulinDays, meals] = await Promise.all([
     listRollups(ctx.db, journal.id, "day", firstDay, lastDay),
     listRollups(ctx.db, journal.id, "night", firstDay, lastDay),
-    listDayFlags(ctx.db, journal.id, firstDay, lastDay),
+    listDayFlags(ctx.db, journal.id, firstDay - FLAG_REACH_DAYS, lastDay + FLAG_REACH_DAYS),
     listInsulinByDay(ctx.db, journal.id, journal.timeZone, from, to),
     listEntries(ctx.db, journal.id, from, to, "meal"),
   ]);

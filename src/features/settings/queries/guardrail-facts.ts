@@ -7,7 +7,7 @@ import type { Db } from "@/db/client";
 import { authorize } from "@/domain/access/policy";
 import { dayNumberOf } from "@/domain/day-start";
 import { isoDayOf } from "@/domain/iso-day";
-import { daysLeftOut } from "@/domain/journal/day-flag";
+import { daysLeftOut, FLAG_REACH_DAYS } from "@/domain/journal/day-flag";
 import type { ChangeReason } from "@/domain/settings/change-reason";
 import { profileDifference, type ProfileDifference } from "@/domain/settings/difference";
 import type { GuardrailFacts } from "@/domain/settings/guardrail-facts";
@@ -37,7 +37,8 @@ export async function guardrailFacts(
   const evidence = change.evidenceDays.map(dayNumberOf);
   const today = dayNumberOf(isoDayOf(at, journal.timeZone));
   const recent = await listRollups(ctx.db, journal.id, "day", today - LOOK_BACK_DAYS, today);
-  const flags = evidence.length > 0 ? await listDayFlags(ctx.db, journal.id, Math.min(...evidence), Math.max(...evidence)) : [];
+  const [firstDay, lastDay] = [Math.min(...evidence) - FLAG_REACH_DAYS, Math.max(...evidence) + FLAG_REACH_DAYS];
+  const flags = evidence.length > 0 ? await listDayFlags(ctx.db, journal.id, firstDay, lastDay) : [];
   const leftOut = new Set(flags.flatMap(daysLeftOut));
   const readings = recent.reduce((sum, r) => sum + r.readings, 0);
   const low = recent.reduce((sum, r) => sum + (r.bandCounts[0] ?? 0) + (r.bandCounts[1] ?? 0), 0);
