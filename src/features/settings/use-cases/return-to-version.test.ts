@@ -1,7 +1,9 @@
 import { beforeAll, describe, expect, it } from "vitest";
 import type { Pool } from "@/db/client";
 import { insertEntry } from "@/db/repositories/entries";
+import { replaceRollups, type RollupRow } from "@/db/repositories/rollups";
 import { listVersions, moveVersion } from "@/db/repositories/versions";
+import { dayNumberOf } from "@/domain/day-start";
 import { contextFor, createHelper, createJournal, strangerContext, TEST_NOW } from "@/testing/factories";
 import { createTestDb } from "@/testing/test-database";
 import { createVersion } from "@/testing/version-factory";
@@ -17,11 +19,11 @@ describe("returnToVersion", () => {
   });
 
   /** Version 1 was superseded by version 2 yesterday. */
-  async function twice(gateReasons: string[] | null = []) {
+  async function twice(gateReasons: string[] | null = [], basal = { first: 500, second: 1000 }) {
     const { journalId, ownerId } = await createJournal(db, { gateReasons });
-    await createVersion(db, { journalId, authorId: ownerId, number: 1, at: daysAgo(10), basalMilliUnitsPerHour: 500 });
+    await createVersion(db, { journalId, authorId: ownerId, number: 1, at: daysAgo(10), basalMilliUnitsPerHour: basal.first });
     await moveVersion(db, { journalId, number: 1, from: "in-effect", to: "superseded", at: daysAgo(1) }, { effectiveUntil: daysAgo(1) });
-    await createVersion(db, { journalId, authorId: ownerId, number: 2, at: daysAgo(1), basalMilliUnitsPerHour: 1000 });
+    await createVersion(db, { journalId, authorId: ownerId, number: 2, at: daysAgo(1), basalMilliUnitsPerHour: basal.second });
     return { journalId, ownerId, ctx: await contextFor(db, ownerId) };
   }
 
@@ -52,6 +54,18 @@ describe("returnToVersion", () => {
     const [back] = await listVersions(db, journalId);
     expect(back).toMatchObject({ number: 3, state: "in-effect" });
     expect(back?.guardrails).toContainEqual(expect.objectContaining({ code: "weaker-and-ketones", answer: "My educator is on the phone." }));
+  });
+
+  it("answers no question about lows by itself where insulin would be more", async () => {
+    const { journalId, ctx } = await twice([], { first: 1000, second: 500 });
+    const day: RollupRow = {
+      journalId, dayNumber: dayNumberOf("2026-03-09"), part: "day", readings: 288, sumMgDl: 288 * 90, sumSquares: 288 * 90 * 90, bandCounts: [10, 30, 248, 0, 0], histogram: [],
+      minutesInPart: 1440, intervalMinutes: 5,
+    };
+    await replaceRollups(db, journalId, [day.dayNumber], [day]);
+    await expect(returnToVersion(ctx, { journalId, number: 1 })).rejects.toMatchObject({ code: "INVALID_INPUT", fields: { "answers.stronger-after-lows": [expect.stringContaining("educator")] } });
+    expect(await states(journalId)).toEqual([[2, "in-effect"], [1, "superseded"]]);
+    expect(await returnToVersion(ctx, { journalId, number: 1, answers: { "stronger-after-lows": "Asked her this morning." } })).toEqual({ number: 3, state: "in-effect" });
   });
 
   it("goes back once on a double press", async () => {
