@@ -27,6 +27,6 @@ describe("what a browser leaves out", () => {
 });
 
 describe("timeOfDay", () => {
-  it.each([["00:00", 0], ["6.30", 390], ["23:59", 1439]])("reads %s", (typed, minute) => expect(timeOfDay.parse(typed)).toBe(minute));
+  it.each([["00:00", 0], ["6.30", 390], ["０６：３０", 390], ["23:59", 1439]])("reads %s", (typed, minute) => expect(timeOfDay.parse(typed)).toBe(minute));
   it.each(["24:00", "12:60", "noon"])("refuses %s", (typed) => expect(timeOfDay.safeParse(typed).success).toBe(false));
 });

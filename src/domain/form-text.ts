@@ -7,12 +7,13 @@ import { z } from "zod";
 
 const FULL_WIDTH_ZERO = 0xff10;
 
-/** Full-width digits, points and commas to plain ones; spaces of every kind dropped. */
+/** Full-width digits, points, commas and colons to plain ones; spaces of every kind dropped. */
 export function plainDigits(typed: string): string {
   return typed
     .replace(/[\uff10-\uff19]/g, (c) => String(c.charCodeAt(0) - FULL_WIDTH_ZERO))
     .replace(/[\uff0e\u3002]/g, ".")
     .replace(/[\uff0c\u066b]/g, ",")
+    .replace(/\uff1a/g, ":")
     .replace(/\s+/gu, "");
 }
 

@@ -26,3 +26,8 @@ export function unitsFromMilliUnits(milliUnits: number): number {
 export function milliUnitsFromUnits(units: number): number {
   return Math.round(units * 1000);
 }
+
+/** The same for a field that may be left empty. */
+export function milliUnitsOrNull(units: number | null): number | null {
+  return units === null ? null : milliUnitsFromUnits(units);
+}

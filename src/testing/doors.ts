@@ -43,7 +43,13 @@ export const DOORS: Readonly<Record<string, Door>> = {
   verifyCredentialAction: { opensTo: "administrator", sample: { userId: ID }, spoilt: ["userId", "x"] },
 
   saveStepAction: owner({ step: "margin", rowVersion: "1" }, ["step", "nowhere"]),
+  chooseTextAction: owner({ step: "basal", rowVersion: "1", keep: "saved" }, ["keep", "both"]),
   proposeStartAction: owner({ rowVersion: "1" }, ["rowVersion", "x"], "family"),
+  recordStartAction: owner({ rowVersion: "1", note: "", effectiveFrom: "", isKnowing: "on", hasKetoneStrips: "on", hasFastCarbohydrate: "on" }, ["isKnowing", ""], "educator"),
+  planStartAction: owner({ plannedStartOn: "2026-03-01" }, ["plannedStartOn", "soon"]),
+  startJournalAction: owner({ startedOn: "2026-03-01", hasKetoneStrips: "on", hasFastCarbohydrate: "on" }, ["startedOn", "soon"], "educator"),
+  saveCardAction: owner({ previousSetup: "Pens.", longActingUnits: "", rapidUnits: "", emergencyNumber: "112", "contacts.0.name": "Bo", "contacts.0.phone": "1" }, ["longActingUnits", "some"], "educator"),
+  writeDosesAction: owner({ longActingUnits: "12", rapidUnits: "" }, ["longActingUnits", "some"], "mentor"),
   changeSettingAction: owner(
     { baseVersion: "1", setting: "basal", from: "00:00", to: "04:00", value: "0.5", targetLow: "", targetHigh: "", reason: "pattern-high", reasonText: "", expectedOutcome: "lows", expectedWindow: "night", expectedDirection: "fall", lookAgainOn: "", revertRule: "" },
     ["from", "noon"], "educator",

@@ -56,6 +56,7 @@ export function ActionForm({
     <FormProvider
       value={{
         register: form.register,
+        setValue: (name, value) => form.setValue(name, value, { shouldValidate: submitCount > 0 }),
         errorOf,
         startOf: (name) => refused?.typed[name] ?? [start[name] ?? []].flat().join("|"),
         isBusy,

@@ -14,6 +14,8 @@ export type FormAction = (previous: FormState, form: FormData) => Promise<FormSt
 
 type FormContextValue = Readonly<{
   register: UseFormRegister<FieldValues>;
+  /** For fields that keep their own state, such as rows that come and go: hands the form a copy to check. */
+  setValue: (name: string, value: unknown) => void;
   /** The one sentence beside a field, from the browser's check or the server's. */
   errorOf: (name: string) => string | undefined;
   /** What stands in the field at first: what was typed before, or the given start. */

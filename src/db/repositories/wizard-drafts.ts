@@ -8,6 +8,12 @@ export async function findDraft(db: Db, journalId: string) {
   return row;
 }
 
+/** The draft under its row's lock, so that two devices save one after the other. */
+export async function findDraftForUpdate(tx: Db, journalId: string) {
+  const [row] = await tx.select().from(wizardDrafts).where(eq(wizardDrafts.journalId, journalId)).for("update");
+  return row;
+}
+
 export async function insertDraft(db: Db, draft: { journalId: string; updatedAt: Date; updatedBy: string }): Promise<void> {
   await db.insert(wizardDrafts).values({ ...draft, answers: {} });
 }

@@ -70,6 +70,7 @@ const TABLE = {
 
   "fallback.read": { to: "journal", roles: CIRCLE, scope: "settings" },
   "fallback.write": { to: "journal", roles: PERSON },
+  "fallback.dose": { to: "journal", roles: EDUCATOR, scope: "settings", isLicenceNeeded: true },
 } as const satisfies Record<string, Rule>;
 
 export type Action = keyof typeof TABLE;

@@ -1,40 +1,48 @@
+import { basalDayText, sideBySide } from "@/domain/onboarding/side-by-side";
+import { MARGINS_PERCENT, withMargin } from "@/domain/onboarding/margin";
 import type { WizardView } from "../queries/wizard";
+import { SideBySideTable } from "./side-by-side-table";
 
-const n = (value: number | null | undefined) => (value === null || value === undefined ? "–" : String(Number(value.toFixed(2))));
+const n = (value: number) => String(Number(value.toFixed(3)));
 
-/** The chosen start beside the plain arithmetic and the standard one: how much weaker it is, setting by setting. */
+/** The start beside the plain arithmetic, and what other margins would come to. */
 export function MarginTable({ view }: Readonly<{ view: WizardView }>) {
-  const { arithmetic, profile } = view;
-  if (!arithmetic || !profile || view.isGateOpen === false) {
+  const { arithmetic, profile, journal } = view;
+  const [basal, ratio, factor] = [arithmetic?.basal.exact, arithmetic?.carbRatio.exact, arithmetic?.sensitivity.exact];
+  if (!arithmetic || !profile || !basal || !ratio || !factor || view.isGateOpen !== true) {
     return <p className="mt-5 max-w-text">The arithmetic shows here once the pages before are filled in, or on your educator’s side where that comes first.</p>;
   }
-  const average = (list: ReadonlyArray<{ startMinute: number }>, value: (b: never) => number) =>
-    list.reduce((sum, b, i) => sum + value(b as never) * ((list[i + 1]?.startMinute ?? 1440) - b.startMinute), 0) / 1440;
-  const rows = [
-    { name: "Basal, U/h", exact: arithmetic.basal.exact?.standard, cautious: arithmetic.basal.cautious, chosen: average(profile.basal, (b: { milliUnitsPerHour: number }) => b.milliUnitsPerHour / 1000), isHigherStronger: true },
-    { name: "Carb ratio, g/U", exact: arithmetic.carbRatio.exact?.standard, cautious: arithmetic.carbRatio.cautious, chosen: average(profile.carbRatio, (b: { milligramsPerUnit: number }) => b.milligramsPerUnit / 1000), isHigherStronger: false },
-    { name: "Sensitivity, mg/dL per U", exact: arithmetic.sensitivity.exact?.standard, cautious: arithmetic.sensitivity.cautious, chosen: average(profile.sensitivity, (b: { microMgDlPerUnit: number }) => b.microMgDlPerUnit / 1e6), isHigherStronger: false },
-  ];
+  const plain = { unitsPerHour: basal.standard, gramsPerUnit: ratio.standard, mgDlPerUnit: factor.standard };
+  const steps = { basalUnits: journal.setup.basalStepMilliUnits / 1000 };
+  const unit = journal.glucoseUnit;
   return (
-    <table className="table mt-5 max-w-text">
-      <thead>
-        <tr><th scope="col">Setting</th><th scope="col" className="number">Plain arithmetic</th><th scope="col" className="number">Cautious</th><th scope="col" className="number">Chosen</th><th scope="col" className="number">Difference</th></tr>
-      </thead>
-      <tbody>
-        {rows.map(({ name, exact, cautious, chosen, isHigherStronger }) => {
-          const change = exact ? (100 * (chosen - exact)) / exact : null;
-          const way = change === null || Math.abs(change) < 0.5 ? "equal" : change > 0 === isHigherStronger ? "stronger" : "weaker";
-          return (
-            <tr key={name}>
-              <th scope="row" className="font-normal">{name}</th>
-              <td className="number">{n(exact)}</td>
-              <td className="number">{n(cautious)}</td>
-              <td className="number">{n(chosen)}</td>
-              <td className="number">{change === null ? "–" : way === "equal" ? "equal" : `${Math.abs(change).toFixed(0)}% ${way}`}</td>
-            </tr>
-          );
-        })}
-      </tbody>
-    </table>
+    <>
+      <p className="mt-5 max-w-text">
+        Plain arithmetic works from {n(arithmetic.totalDailyDose.standard ?? 0)} U a day. Your start has {basalDayText(profile.basal)} of basal a day.
+        Weaker means: less basal, more grams for a unit, and a unit that is expected to lower glucose further.
+      </p>
+      <SideBySideTable rows={sideBySide(profile, null, arithmetic, unit)} hasNow={false} />
+      <section className="mt-8">
+        <h2 className="text-section">What if the margin were another one</h2>
+        <p className="max-w-text">Each row makes the plain arithmetic weaker by one share, rounded to the weaker side. Computed for this page; no source calls one of them right.</p>
+        <table className="table mt-2 max-w-text">
+          <thead><tr><th scope="col">Weaker by</th><th scope="col" className="number">Basal, U/h</th><th scope="col" className="number">Ratio, g/U</th><th scope="col" className="number">Factor, {unit}</th></tr></thead>
+          <tbody>
+            {MARGINS_PERCENT.map((percent) => {
+              const row = withMargin(plain, percent, steps, unit);
+              return (
+                <tr key={percent}>
+                  <th scope="row" className="font-normal">{percent === 0 ? "nothing, rounded" : `${percent}%`}</th>
+                  <td className="number">{n(row.unitsPerHour)}</td>
+                  <td className="number">{n(row.gramsPerUnit)}</td>
+                  <td className="number">{n(row.sensitivity)}</td>
+                </tr>
+              );
+            })}
+          </tbody>
+        </table>
+        <p className="mt-3 max-w-text">Too strong shows as lows. Too weak shows as glucose that stays high and, with too little insulin, as ketones. A margin moves one towards the other; neither goes away with it.</p>
+      </section>
+    </>
   );
 }

@@ -32,7 +32,16 @@ describe("createJournal", () => {
     expect(can((await strangerContext(db)).actor, "journal.read", journalId)).toBe(false);
   });
 
+  it("keeps the device’s steps in whole milli-units, and the usual ones where none were told", async () => {
+    const ctx = await strangerContext(db);
+    const told = await createJournal(ctx, { ...form, basalStepUnits: "0,025 U/h", bolusStepUnits: "0.1" });
+    expect((await findJournal(db, told.journalId))?.setup).toMatchObject({ basalStepMilliUnits: 25, bolusStepMilliUnits: 100 });
+    const untold = await createJournal(ctx, form);
+    expect((await findJournal(db, untold.journalId))?.setup).toMatchObject({ basalStepMilliUnits: 50, bolusStepMilliUnits: 50 });
+  });
+
   it.each([
+    ["basalStepUnits", { basalStepUnits: "none" }],
     ["name", { name: " " }],
     ["timeZone", { timeZone: "Moon/Base" }],
     ["plannedStartOn", { plannedStartOn: "soon" }],

@@ -88,6 +88,12 @@ describe("proposeStart", () => {
     expect(first?.contentHash).not.toBe(second?.contentHash);
   });
 
+  it("never sends the preset in place of a page that can’t be read", async () => {
+    const { journalId, ctx, input } = await drafted({ ...complete, basal: { blocks: [{ from: "00:00", value: "0.3" }, { from: "05:00", value: "" }] } });
+    await expect(proposeStart(ctx, input)).rejects.toMatchObject({ code: "INVALID_INPUT", fields: { form: [expect.stringContaining("Basal")] } });
+    expect(await listVersions(db, journalId)).toEqual([]);
+  });
+
   it.each([["about-you"], ["gate"]] as const)("refuses while the page %s is missing, and writes nothing", async (page) => {
     const { [page]: _missing, ...rest } = complete;
     const { journalId, ctx, input } = await drafted(rest);

@@ -1,40 +1,39 @@
 import type { Metadata } from "next";
 import { Caution } from "@/components/caution";
-import { MarginNote, Page, Section } from "@/components/page";
-import { addDays } from "@/domain/day-start";
+import { MarginNote, Page } from "@/components/page";
 import { isoDayText } from "@/domain/day-text";
-import { FOLLOW_UPS, PLAN } from "@/domain/journal/plan";
+import { dateOfDay, FOLLOW_UPS, PLAN_VARIANTS, REVIEWED_EACH_TIME } from "@/domain/journal/plan";
 import { journalHeader } from "@/features/days/queries/journal-header";
+import { CommonlyFound, PlanPhases } from "@/features/onboarding/components/plan-phases";
+import { StartDay } from "@/features/onboarding/components/start-day";
+import { planOf } from "@/features/onboarding/queries/plan";
 import { forPage } from "@/lib/action";
 
 export const metadata: Metadata = { title: "Plan" };
 
 export default async function PlanPage({ params }: Readonly<{ params: Promise<{ journalId: string }> }>) {
   const { journalId } = await params;
-  const header = await forPage((ctx) => journalHeader(ctx, { journalId }));
-  const dayOne = header.startedOn ?? header.plannedStartOn;
-  const dateOf = (day: number) => (dayOne ? isoDayText(addDays(dayOne, day - 1)) : `day ${day}`);
+  const { header, plan } = await forPage(async (ctx) => ({ header: await journalHeader(ctx, { journalId }), plan: await planOf(ctx, { journalId }) }));
+  const dayOne = plan.startedOn ?? plan.plannedStartOn;
+  const title = plan.startedOn ? `Day 1 was ${isoDayText(plan.startedOn)}.` : plan.plannedStartOn ? `Day 1 is planned for ${isoDayText(plan.plannedStartOn)}.` : "No start day yet.";
   return (
     <Page
-      title={header.startedOn ? `Day 1 was ${isoDayText(header.startedOn)}.` : header.plannedStartOn ? `Day 1 is planned for ${isoDayText(header.plannedStartOn)}.` : "No start day yet."}
+      title={title}
       lead={<p>The day the starting profile comes into effect on the device is day 1. Everything else counts from it.</p>}
       margin={
         <>
-          <MarginNote title="Follow-ups"><ul>{FOLLOW_UPS.map((f) => <li key={f.dayOfJournal}>{dateOf(f.dayOfJournal)}: {f.what.toLowerCase()}</li>)}</ul></MarginNote>
+          <MarginNote title="Follow-ups">
+            <ul>{FOLLOW_UPS.map((f) => <li key={f.dayOfJournal}>{dayOne ? isoDayText(dateOfDay(dayOne, f.dayOfJournal)) : `Day ${f.dayOfJournal}`}: {f.what.toLowerCase()}</li>)}</ul>
+            <p className="mt-1.5">Looked through each time: {REVIEWED_EACH_TIME.join(", ")}. A composite of published schedules and an endocrine pump checklist.</p>
+          </MarginNote>
+          <MarginNote title="Where you come from"><p>{PLAN_VARIANTS[plan.therapy]}</p></MarginNote>
           <Caution fallbackHref={`/j/${journalId}/fallback`} />
         </>
       }
     >
-      {PLAN.map((phase) => (
-        <Section key={phase.name} title={phase.name}>
-          <p className="text-note text-soft">{phase.firstDay === phase.lastDay ? dateOf(phase.firstDay) : `${dateOf(phase.firstDay)} to ${dateOf(phase.lastDay)}`}</p>
-          <ul className="max-w-text">
-            {phase.tasks.map((task) => (
-              <li key={task.what} className="border-b border-hairline py-2">{task.what} <span className="text-note text-soft">({task.who}; {task.source})</span></li>
-            ))}
-          </ul>
-        </Section>
-      ))}
+      <StartDay plan={plan} journalId={journalId} />
+      <PlanPhases dayOne={dayOne} today={plan.today} journalId={journalId} isOwner={header.role === "person"} />
+      <CommonlyFound dayOne={dayOne} />
     </Page>
   );
 }
