@@ -1,12 +1,12 @@
 "use client";
 
 import { zodResolver } from "@hookform/resolvers/zod";
-import { startTransition, useActionState, useEffect, useId, useRef, type ReactNode } from "react";
+import { startTransition, useActionState, useEffect, useId, useState, type ReactNode } from "react";
 import { get, useForm, type FieldErrors, type FieldValues } from "react-hook-form";
 import type { z } from "zod";
 import { Button } from "../button";
 import { ErrorSummary } from "./error-summary";
-import { FormProvider, type FormAction } from "./form-state";
+import { FormProvider, type FormAction, type FormState } from "./form-state";
 
 /**
  * A form that is checked by one schema on both sides, works without script,
@@ -14,7 +14,7 @@ import { FormProvider, type FormAction } from "./form-state";
  * words as in the summary on top.
  */
 export function ActionForm({
-  schema, action, submitLabel, start = {}, hidden = {}, extraButtons, idPrefix, submitKind, children, onDone,
+  schema, action, submitLabel, start = {}, hidden = {}, extraButtons, idPrefix, submitKind, children, onDone, done, isEmptiedWhenDone = false,
 }: Readonly<{
   schema: z.ZodType<FieldValues, FieldValues>;
   action: FormAction;
@@ -29,21 +29,31 @@ export function ActionForm({
   submitKind?: "next" | "other";
   children?: ReactNode;
   onDone?: (data: unknown) => void;
+  /** What is said once the server has taken it; unlike `onDone` it works without script. */
+  done?: ReactNode | ((data: unknown) => ReactNode);
+  /** For secrets and for forms that are sent again and again. */
+  isEmptiedWhenDone?: boolean;
 }>) {
   const [state, dispatch, isBusy] = useActionState(action, null);
   const formId = useId();
-  const formRef = useRef<HTMLFormElement>(null);
   const form = useForm<FieldValues>({
     resolver: zodResolver(schema),
     shouldFocusError: false,
     defaultValues: { ...nested(start), ...nested(hidden) },
   });
   const { errors, submitCount } = form.formState;
-  const refused = state && !state.ok ? state : null;
+  /** The server's answer that a later check in the browser has overtaken. */
+  const [overtaken, setOvertaken] = useState<FormState>(null);
+  const answer = state && !state.ok ? state : null;
+  const refused = isBusy || answer === overtaken ? null : answer;
 
   useEffect(() => {
     if (state?.ok) onDone?.(state.data);
   }, [state, onDone]);
+  const { reset } = form;
+  useEffect(() => {
+    if (state?.ok && isEmptiedWhenDone) reset();
+  }, [state, isEmptiedWhenDone, reset]);
 
   const errorOf = (name: string): string | undefined => {
     const own: { message?: string; root?: { message?: string } } | undefined = get(errors, name);
@@ -51,6 +61,7 @@ export function ActionForm({
   };
   const items = [...clientItems(errors), ...Object.entries(refused?.fields ?? {}).map(([name, all]) => ({ name, message: all[0] ?? "" }))];
   const summary = items.length > 0 ? uniqueByName(items) : [];
+  const doneWords = state?.ok && summary.length === 0 ? (typeof done === "function" ? done(state.data) : done) : null;
 
   return (
     <FormProvider
@@ -58,14 +69,13 @@ export function ActionForm({
         register: form.register,
         setValue: (name, value) => form.setValue(name, value, { shouldValidate: submitCount > 0 }),
         errorOf,
-        startOf: (name) => refused?.typed[name] ?? [start[name] ?? []].flat().join("|"),
+        startOf: (name) => answer?.typed[name] ?? [start[name] ?? []].flat().join("|"),
         isBusy,
         idPrefix,
       }}
     >
       <form
         id={formId}
-        ref={formRef}
         action={dispatch}
         noValidate
         onSubmit={(event) => {
@@ -73,13 +83,14 @@ export function ActionForm({
           if (isBusy) return;
           const submitter = event.nativeEvent.submitter;
           const data = new FormData(event.currentTarget, submitter);
-          void form.handleSubmit(() => startTransition(() => dispatch(data)))(event);
+          void form.handleSubmit(() => startTransition(() => dispatch(data)), () => setOvertaken(state))(event);
         }}
         className="mt-6 max-w-text"
       >
         {summary.length > 0 || refused ? (
-          <ErrorSummary key={`${submitCount}-${refused ? JSON.stringify(refused.fields) : ""}`} message={refused?.message} items={summary} idPrefix={idPrefix} />
+          <ErrorSummary key={`${submitCount}-${refused ? JSON.stringify(refused.fields) : ""}`} message={refused?.message} items={summary} unseen={[...Object.keys(hidden), "form"]} idPrefix={idPrefix} />
         ) : null}
+        {done ? <div role="status">{doneWords ? <div className="mb-6 border-l-4 border-range py-1 pl-4">{doneWords}</div> : null}</div> : null}
         {Object.entries(hidden).map(([name, value]) => <input key={name} type="hidden" {...form.register(name)} defaultValue={value} />)}
         {children}
         <div className="mt-6 flex flex-wrap gap-3">

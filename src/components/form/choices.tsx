@@ -2,7 +2,7 @@
 
 import type { ReactNode } from "react";
 import { fieldId } from "./error-summary";
-import { FieldNotes, type Option } from "./fields";
+import { describedBy, FieldNotes, type Option } from "./fields";
 import { useFormContext } from "./form-state";
 
 type Group = Readonly<{ name: string; label: string; hint?: ReactNode; options: ReadonlyArray<Option>; isInline?: boolean }>;
@@ -23,7 +23,7 @@ function Choices({ name, label, hint, options, isInline, type }: Group & { type:
   const id = fieldId(name, idPrefix);
   const chosen = (startOf(name) ?? "").split("|");
   return (
-    <fieldset className="mt-5" aria-describedby={hint ? `${id}-hint` : undefined}>
+    <fieldset className="mt-5" aria-describedby={describedBy(id, hint, error)}>
       <legend className="font-semibold">{label}</legend>
       <FieldNotes name={name} hint={hint} error={error} />
       <div className={isInline ? "flex flex-wrap gap-x-6" : ""}>
@@ -62,6 +62,7 @@ export function TickField({ name, label }: Readonly<{ name: string; label: React
           type="checkbox"
           defaultChecked={startOf(name) === "on"}
           aria-invalid={error ? true : undefined}
+          aria-describedby={describedBy(id, null, error)}
           className="mt-0.5 size-6 shrink-0 accent-ink"
           {...register(name)}
         />

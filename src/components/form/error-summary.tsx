@@ -4,8 +4,14 @@ import { useEffect, useRef } from "react";
 
 /** "There is a problem", with a link to each field; takes the focus when it appears. */
 export function ErrorSummary({
-  message, items, idPrefix,
-}: Readonly<{ message?: string; items: ReadonlyArray<{ name: string; message: string }>; idPrefix?: string }>) {
+  message, items, unseen = [], idPrefix,
+}: Readonly<{
+  message?: string;
+  items: ReadonlyArray<{ name: string; message: string }>;
+  /** Names without a field that could be gone to. */
+  unseen?: ReadonlyArray<string>;
+  idPrefix?: string;
+}>) {
   const box = useRef<HTMLDivElement>(null);
   useEffect(() => {
     box.current?.focus();
@@ -22,16 +28,18 @@ export function ErrorSummary({
       <ul>
         {items.map(({ name, message: sentence }) => (
           <li key={name}>
-            <a
-              className="link font-semibold text-emergency"
-              href={`#${fieldId(name, idPrefix)}`}
-              onClick={(event) => {
-                event.preventDefault();
-                document.getElementById(fieldId(name, idPrefix))?.focus();
-              }}
-            >
-              {sentence}
-            </a>
+            {unseen.includes(name) ? <span className="font-semibold text-emergency">{sentence}</span> : (
+              <a
+                className="link font-semibold text-emergency"
+                href={`#${fieldId(name, idPrefix)}`}
+                onClick={(event) => {
+                  event.preventDefault();
+                  document.getElementById(fieldId(name, idPrefix))?.focus();
+                }}
+              >
+                {sentence}
+              </a>
+            )}
           </li>
         ))}
       </ul>

@@ -11,7 +11,8 @@ type Common = Readonly<{
   isOptional?: boolean;
 }>;
 
-function describedBy(id: string, hint: ReactNode, error: string | undefined): string | undefined {
+/** The ids of a field's hint and error, for `aria-describedby`. */
+export function describedBy(id: string, hint: ReactNode, error: string | undefined): string | undefined {
   const ids = [hint ? `${id}-hint` : "", error ? `${id}-error` : ""].filter(Boolean);
   return ids.length > 0 ? ids.join(" ") : undefined;
 }
@@ -38,7 +39,7 @@ export function FieldNotes({ name, hint, error }: Readonly<{ name: string; hint?
       {hint ? <div id={`${id}-hint`} className="text-note text-soft">{hint}</div> : null}
       {error ? (
         <p id={`${id}-error`} className="font-semibold text-emergency">
-          <span className="sr-only">Error: </span>
+          <span className="sr-only">Error:</span>{" "}
           {error}
         </p>
       ) : null}
