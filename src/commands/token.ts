@@ -2,9 +2,8 @@ import { openPool } from "@/db/client";
 import { findAccountByEmail } from "@/db/repositories/accounts";
 import { insertToken } from "@/db/repositories/api-tokens";
 import { env } from "@/env";
+import { TOKEN_DAYS } from "@/features/account/constants";
 import { hashSecret, newSecret } from "@/lib/secrets";
-
-const DAYS = 90;
 
 /** `npm run token -- E-MAIL [read|write]`: a personal token for the HTTP interface, shown once. */
 async function makeToken(email: string, scope: string): Promise<void> {
@@ -15,7 +14,7 @@ async function makeToken(email: string, scope: string): Promise<void> {
     if (!account) throw new Error(`no account has the address ${email}`);
     const secret = newSecret();
     const createdAt = new Date();
-    await insertToken(db, { userId: account.id, tokenHash: hashSecret(secret), label: "made on the server", scope, createdAt, expiresAt: new Date(createdAt.getTime() + DAYS * 86_400_000) });
+    await insertToken(db, { userId: account.id, tokenHash: hashSecret(secret), label: "made on the server", scope, createdAt, expiresAt: new Date(createdAt.getTime() + TOKEN_DAYS * 86_400_000) });
     process.stdout.write(`${secret}\n`);
   } finally {
     await db.$client.end();

@@ -35,6 +35,12 @@ export async function listTokens(db: Db, userId: string, now: Date) {
     .orderBy(desc(apiTokens.createdAt));
 }
 
-export async function revokeToken(db: Db, userId: string, tokenId: string, at: Date): Promise<void> {
-  await db.update(apiTokens).set({ revokedAt: at }).where(and(eq(apiTokens.id, tokenId), eq(apiTokens.userId, userId)));
+/** End a token of this account; says whether there was one that still counted. */
+export async function revokeToken(db: Db, userId: string, tokenId: string, at: Date): Promise<boolean> {
+  const rows = await db
+    .update(apiTokens)
+    .set({ revokedAt: at })
+    .where(and(eq(apiTokens.id, tokenId), eq(apiTokens.userId, userId), isNull(apiTokens.revokedAt)))
+    .returning({ id: apiTokens.id });
+  return rows.length > 0;
 }

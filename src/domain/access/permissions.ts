@@ -28,6 +28,7 @@ const DIGEST = ["weekly-digest"] as const;
 const TABLE = {
   "account.enter": { to: "anyone" },
   "account.use": { to: "signed-in" },
+  "token.manage": { to: "verified" },
   "invitation.accept": { to: "verified" },
   "journal.list": { to: "verified" },
   "journal.create": { to: "verified" },

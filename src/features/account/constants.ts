@@ -5,6 +5,9 @@ export const PASSWORD_CHARACTERS_AT_MOST = 256;
 export const VERIFY_LINK_HOURS = 48;
 export const RESET_LINK_MINUTES = 60;
 
+export const TOKEN_DAYS = 90;
+export const TOKENS_AT_MOST = 20;
+
 /** The demo's invented accounts, by the role they show. */
 export const DEMO_ADDRESSES = {
   person: "ilka@demo.example",

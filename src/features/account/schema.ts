@@ -58,8 +58,8 @@ export const changePasswordInput = z.object({
 export const endSessionInput = z.object({ sessionId: z.string().regex(/^[0-9a-f]{64}$/) });
 
 export const createTokenInput = z.object({
-  label: z.string().trim().min(1, "Name what this token is for.").max(80),
-  scope: z.enum(["read", "write"]),
+  label: z.string({ error: "Name what this token is for." }).trim().min(1, "Name what this token is for.").max(80, "A name has at most 80 characters."),
+  scope: z.enum(["read", "write"], "Choose what this token may do."),
 });
 export const revokeTokenInput = z.object({ tokenId: z.uuid() });
 
