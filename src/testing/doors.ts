@@ -36,6 +36,8 @@ export const DOORS: Readonly<Record<string, Door>> = {
   changePasswordAction: { opensTo: "signed-in", sample: { currentPassword: "x", password: PASSWORD }, spoilt: ["password", "short"] },
   endSessionAction: { opensTo: "signed-in", sample: { sessionId: HASH }, spoilt: ["sessionId", "x"] },
   submitCredentialAction: { opensTo: "signed-in", sample: { profession: "a", licenceNumber: "b", jurisdiction: "c", expiresOn: "2099-01-01" }, spoilt: ["expiresOn", "soon"] },
+  createTokenAction: { opensTo: "signed-in", sample: { label: "a", scope: "read" }, spoilt: ["scope", "own"] },
+  revokeTokenAction: { opensTo: "signed-in", sample: { tokenId: ID }, spoilt: ["tokenId", "x"] },
   saveDigestPreferenceAction: { opensTo: "signed-in", sample: { level: "links", weekday: "1", minuteOfDay: "08:00" }, spoilt: ["level", "all"] },
   sendDigestNowAction: { opensTo: "signed-in", sample: {}, spoilt: null },
   createJournalAction: { opensTo: "signed-in", sample: { name: "n", glucoseUnit: "mg/dL", timeZone: "UTC", therapy: "pump", plannedStartOn: "", pump: "", sensor: "", controller: "", insulin: "" }, spoilt: ["therapy", "hope"] },

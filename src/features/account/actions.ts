@@ -1,16 +1,21 @@
 "use server";
 
+import { refresh } from "next/cache";
+import { headers } from "next/headers";
 import { redirect } from "next/navigation";
 import { formValues, toActionResult, type ActionResult } from "@/lib/action";
 import { requestContext } from "@/lib/request-context";
 import { revokeAllSessions, revokeSession } from "@/lib/session";
 import { dropSessionCookie, startSession } from "@/lib/session-cookie";
+import { clientAddress } from "@/lib/client-address";
 import type { SignInInput, SignUpInput } from "./schema";
 import { changePassword } from "./use-cases/change-password";
+import { createToken } from "./use-cases/create-token";
 import { endSession } from "./use-cases/end-session";
 import { requestReset } from "./use-cases/request-reset";
 import { resendVerification } from "./use-cases/resend-verification";
 import { resetPassword } from "./use-cases/reset-password";
+import { revokeToken } from "./use-cases/revoke-token";
 import { signIn } from "./use-cases/sign-in";
 import { signInToDemo } from "./use-cases/sign-in-to-demo";
 import { signOut } from "./use-cases/sign-out";
@@ -21,6 +26,13 @@ import { verifyEmail } from "./use-cases/verify-email";
 
 type Previous = ActionResult | null;
 const values = <T>(form: FormData) => formValues(form) as T;
+
+/** The page behind the form shows what was changed. */
+async function thenRefresh<T>(result: Promise<ActionResult<T>>): Promise<ActionResult<T>> {
+  const known = await result;
+  if (known.ok) refresh();
+  return known;
+}
 
 export async function signUpAction(_previous: Previous, form: FormData): Promise<ActionResult> {
   const result = await toActionResult(async (ctx) => {
@@ -33,7 +45,7 @@ export async function signUpAction(_previous: Previous, form: FormData): Promise
 
 export async function signInAction(_previous: Previous, form: FormData): Promise<ActionResult> {
   const result = await toActionResult(async (ctx) => {
-    const found = await signIn(ctx, values<SignInInput>(form));
+    const found = await signIn(ctx, values<SignInInput>(form), clientAddress(await headers()));
     await startSession(found.userId, ctx.now());
     return found.isEmailVerified ? found.next : "/check-your-mail";
   }, form);
@@ -86,24 +98,32 @@ export async function resetPasswordAction(_previous: Previous, form: FormData): 
 }
 
 export async function updateProfileAction(_previous: Previous, form: FormData): Promise<ActionResult> {
-  return toActionResult((ctx) => updateProfile(ctx, values(form)), form);
+  return thenRefresh(toActionResult((ctx) => updateProfile(ctx, values(form)), form));
 }
 
 export async function changePasswordAction(_previous: Previous, form: FormData): Promise<ActionResult> {
-  return toActionResult(async (ctx) => {
+  return thenRefresh(toActionResult(async (ctx) => {
     const { userId } = await changePassword(ctx, values(form));
     const { sessionId } = await requestContext();
     await revokeAllSessions(userId, sessionId ?? undefined);
-  }, form);
+  }, form));
 }
 
 export async function endSessionAction(_previous: Previous, form: FormData): Promise<ActionResult> {
-  return toActionResult(async (ctx) => {
+  return thenRefresh(toActionResult(async (ctx) => {
     const { userId, sessionId } = endSession(ctx, values<{ sessionId: string }>(form));
     await revokeSession(userId, sessionId);
-  }, form);
+  }, form));
 }
 
 export async function submitCredentialAction(_previous: Previous, form: FormData): Promise<ActionResult> {
-  return toActionResult((ctx) => submitCredential(ctx, values(form)), form);
+  return thenRefresh(toActionResult((ctx) => submitCredential(ctx, values(form)), form));
+}
+
+export async function createTokenAction(_previous: Previous, form: FormData): Promise<ActionResult> {
+  return thenRefresh(toActionResult((ctx) => createToken(ctx, values(form)), form));
+}
+
+export async function revokeTokenAction(_previous: Previous, form: FormData): Promise<ActionResult> {
+  return thenRefresh(toActionResult((ctx) => revokeToken(ctx, values(form)), form));
 }

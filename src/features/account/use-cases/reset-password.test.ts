@@ -74,5 +74,6 @@ describe("a new password", () => {
     expect(await enters(email, TEST_PASSWORD)).toBe(true);
     await changePassword(ctx, { currentPassword: TEST_PASSWORD, password: NEW_PASSWORD });
     expect([await enters(email, TEST_PASSWORD), await enters(email, NEW_PASSWORD)]).toEqual([false, true]);
+    expect((await mailsTo(email)).map((m) => m.kind)).toEqual(["password-changed"]);
   });
 });

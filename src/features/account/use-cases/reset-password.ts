@@ -21,7 +21,7 @@ export async function resetPassword(ctx: Context, input: { token: string; passwo
   const { token, password } = resetPasswordInput.parse(input);
   authorize(ctx.actor, "account.enter");
   const passwordHash = await hashPassword(password);
-  const mail = await renderMail(PasswordChangedMail());
+  const mail = await renderMail(PasswordChangedMail({ signedOut: "Every device was signed out." }));
   return ctx.db.transaction(async (tx) => {
     const at = ctx.now();
     const userId = await spendEmailToken(tx, { tokenHash: hashSecret(token), purpose: "reset-password", at });

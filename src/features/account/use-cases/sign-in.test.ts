@@ -39,6 +39,14 @@ describe("signIn", () => {
     }
   });
 
+  it("stops one network address that goes through the accounts, and no other", async () => {
+    const enter = (n: number, from: string) => signIn(anonymousContext(db), { email: `guess-${n}@example.org`, password: "x" }, from);
+    const spent = await Promise.allSettled(Array.from({ length: 50 }, (_, n) => enter(n, "192.0.2.1")));
+    expect(spent.every((one) => one.status === "rejected" && (one.reason as { code?: string }).code === "INVALID_INPUT")).toBe(true);
+    await expect(enter(50, "192.0.2.1")).rejects.toMatchObject({ code: "TOO_MANY" });
+    await expect(enter(50, "192.0.2.2")).rejects.toMatchObject({ code: "INVALID_INPUT" });
+  });
+
   it.each([
     ["/j/1/today?x=1#part", "/j/1/today?x=1#part"],
     ["//elsewhere.example", "/journals"],

@@ -11,13 +11,17 @@ const SAME_WORDS = "This e-mail address and password do not belong together.";
 
 /**
  * Check an address and a password. An unknown address costs the same time and
- * gets the same words as a password that does not match.
+ * gets the same words as a password that does not match. Attempts are counted
+ * per account and, where it is known, per network address `from`.
  *
  * @throws {AppError} INVALID_INPUT on `password`, TOO_MANY
  */
-export async function signIn(ctx: Context, input: SignInInput): Promise<{ userId: string; isEmailVerified: boolean; next: string }> {
+export async function signIn(
+  ctx: Context, input: SignInInput, from = "",
+): Promise<{ userId: string; isEmailVerified: boolean; next: string }> {
   const { email, password, next } = signInInput.parse(input);
   authorize(ctx.actor, "account.enter");
+  if (from) await countAttempt(ctx.db, "sign-in-address", from);
   await countAttempt(ctx.db, "sign-in", email);
   const account = await findAccountByEmail(ctx.db, email);
   const isRight = account ? await isPasswordRight(account.passwordHash, password) : await spendPasswordCheck(password).then(() => false);
