@@ -1,22 +1,19 @@
 import type { ReactNode } from "react";
+import { AccountShell } from "@/components/account-shell";
 import { PressButton } from "@/components/form/press-button";
-import { Shell } from "@/components/shell";
 import { signOutAction } from "@/features/account/actions";
 import { requestContext } from "@/lib/request-context";
 
 export default async function AccountLayout({ children }: Readonly<{ children: ReactNode }>) {
   const { actor } = await requestContext();
-  const word = (href: string, label: string) => ({ href, label, isCurrent: false });
-  const isEducator = actor.type === "user" && actor.grants.some((g) => g.role === "educator");
-  const words = [
-    word("/journals", "Journals"),
-    ...(isEducator ? [word("/review", "Reviews")] : []),
-    word("/account", "Account"),
-    ...(actor.type === "user" && actor.isAdministrator ? [word("/administration", "Administration")] : []),
-  ];
+  const isUser = actor.type === "user";
   return (
-    <Shell home="/journals" words={words} more={[word("/help", "Help")]} footer={actor.type === "user" ? <footer className="no-print border-t border-hairline py-4"><PressButton action={signOutAction} label="Sign out" look="link" /></footer> : null}>
+    <AccountShell
+      isEducator={isUser && actor.grants.some((g) => g.role === "educator")}
+      isAdministrator={isUser && actor.isAdministrator}
+      signOut={isUser ? <PressButton action={signOutAction} label="Sign out" look="link" /> : null}
+    >
       {children}
-    </Shell>
+    </AccountShell>
   );
 }

@@ -2,7 +2,7 @@ import type { Metadata } from "next";
 import Link from "next/link";
 import { Page } from "@/components/page";
 import { env } from "@/env";
-import { ResendForm } from "@/features/account/components/forms";
+import { ResendForm } from "@/features/account/components/entry-forms";
 import { requestContext } from "@/lib/request-context";
 
 export const metadata: Metadata = { title: "Check your mail" };

@@ -1,6 +1,6 @@
 import type { Metadata } from "next";
 import { Page } from "@/components/page";
-import { RequestResetForm, ResetPasswordForm } from "@/features/account/components/forms";
+import { RequestResetForm, ResetPasswordForm } from "@/features/account/components/entry-forms";
 
 export const metadata: Metadata = { title: "A new password", referrer: "no-referrer" };
 

@@ -1,6 +1,6 @@
 import type { Metadata } from "next";
 import { Page } from "@/components/page";
-import { VerifyForm } from "@/features/account/components/forms";
+import { VerifyForm } from "@/features/account/components/entry-forms";
 
 export const metadata: Metadata = { title: "Verify your address", referrer: "no-referrer" };
 

@@ -8,7 +8,7 @@ export function AccountExistsMail({ href }: Readonly<{ href: string }>) {
       link={{ href, label: "Choose a new password" }}
       foot="You get this because somebody typed this address on the sign-up page. If it was not you, do nothing: your account is as it was."
     >
-      <EmailText>There is a Notchbook account with this address. If the password is gone from your mind, choose a new one.</EmailText>
+      <EmailText>There is a Notchbook account with this address. If you don’t know its password any more, choose a new one.</EmailText>
     </EmailFrame>
   );
 }
