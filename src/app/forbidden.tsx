@@ -1,11 +1,14 @@
+import type { Metadata } from "next";
 import Link from "next/link";
-import { Page } from "@/components/page";
-import { Shell } from "@/components/shell";
+import { StopPage } from "@/components/stop-page";
+
+export const metadata: Metadata = { title: "Not part of your role" };
 
 export default function Forbidden() {
   return (
-    <Shell home="/" words={[]} more={[{ href: "/help", label: "Help", isCurrent: false }]}>
-      <Page title="Your role does not include this." lead={<p>What a helper sees is up to the person. Ask them, or go back to <Link className="link" href="/journals">your notebooks</Link>.</p>} />
-    </Shell>
+    <StopPage
+      title="Your role does not include this."
+      lead={<p>What a helper sees is up to the person. Ask them, or go back to <Link className="link" href="/journals">your notebooks</Link>.</p>}
+    />
   );
 }

@@ -107,6 +107,11 @@ function typedText(form: FormData): Record<string, string> {
   return typed;
 }
 
+/** An unforeseen error under the request's id, which its page shows and the log carries. Redirects and the like keep the mark they have. */
+function withReference(error: unknown, requestId: string): unknown {
+  return error instanceof Error && !("digest" in error) ? Object.assign(error, { digest: requestId }) : error;
+}
+
 /**
  * Run a read for a page; refusals become the page's status: signed out goes to
  * sign-in, a stranger sees 404, too weak a role 403.
@@ -117,7 +122,7 @@ export async function forPage<T>(work: (ctx: Context) => Promise<T>): Promise<T>
     return await work(ctx);
   } catch (error) {
     if (error instanceof z.ZodError) notFound();
-    if (!(error instanceof AppError)) throw error;
+    if (!(error instanceof AppError)) throw withReference(error, ctx.requestId);
     if (error.code === "UNAUTHENTICATED") redirect(`/sign-in?next=${encodeURIComponent((await headers()).get("x-path") ?? "/")}`);
     if (error.code === "NOT_FOUND") notFound();
     if (error.code === "FORBIDDEN") {
