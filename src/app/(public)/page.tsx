@@ -7,8 +7,11 @@ import { highestFalseBetter } from "@/domain/comparison/calibration-figures";
 import { env } from "@/env";
 import { DemoButtons } from "@/features/account/components/demo-buttons";
 import { FrontRule } from "@/features/account/components/front-rule";
+import { requestContext } from "@/lib/request-context";
 
-export default function FrontPage() {
+export default async function FrontPage() {
+  const { actor } = await requestContext();
+  const isSignedIn = actor.type === "user";
   const oneIn = Math.floor(1 / highestFalseBetter(calibration));
   return (
     <div className="max-w-[74rem] desk:grid desk:grid-cols-[minmax(0,1fr)_15.5rem] desk:gap-x-11">
@@ -20,10 +23,10 @@ export default function FrontPage() {
               Notchbook is the journal for the first months on a new closed-loop insulin setup. It works out a careful start with its
               sources, keeps every version of your settings, and tells you what followed each change, or honestly that it can’t be told yet.
             </p>
-            <p className="mt-3">A mentor asks the good questions. An educator signs the numbers. You decide what they see.</p>
+            <p className="mt-3">A mentor asks the questions. An educator signs the numbers. You decide what they see.</p>
             <ButtonRow>
-              <ButtonLink kind="next" href="/sign-up">Start a journal</ButtonLink>
-              <ButtonLink href="/sign-in">Sign in</ButtonLink>
+              <ButtonLink kind="next" href={isSignedIn ? "/journals/new" : "/sign-up"}>Start a journal</ButtonLink>
+              {isSignedIn ? <ButtonLink href="/journals">Your journals</ButtonLink> : <ButtonLink href="/sign-in">Sign in</ButtonLink>}
             </ButtonRow>
           </div>
           <div className="mt-8 desk:mt-2"><FrontRule /></div>
@@ -39,7 +42,7 @@ export default function FrontPage() {
         </Section>
         <Section title="Why believe a comparison?">
           <p className="max-w-text">
-            Looked at every day for two weeks, a change that did nothing is called better in fewer than one in {oneIn} cases, on{" "}
+            Looked at every day from day {calibration.looks.first} to day {calibration.looks.last}, a change that did nothing is called better in fewer than one in {oneIn} cases, on{" "}
             {calibration.people} simulated people. <Link className="link" href="/how-it-compares">The page that shows it</Link> says what that covers and what it does not.
           </p>
         </Section>
