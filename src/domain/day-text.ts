@@ -18,3 +18,8 @@ export function isoDayText(isoDay: string): string {
 export function counted(count: number, one: string, many = `${one}s`): string {
   return `${count} ${count === 1 ? one : many}`;
 }
+
+/** An ISO date as "23 September 2028", for what lies years ahead. */
+export function isoDateText(isoDay: string): string {
+  return new Intl.DateTimeFormat("en-GB", { timeZone: "UTC", day: "numeric", month: "long", year: "numeric" }).format(new Date(`${isoDay}T00:00:00Z`));
+}

@@ -16,7 +16,7 @@ export default async function FrontPage() {
   return (
     <div className="max-w-[74rem] desk:grid desk:grid-cols-[minmax(0,1fr)_15.5rem] desk:gap-x-11">
       <div className="min-w-0">
-        <div className="desk:grid desk:grid-cols-2 desk:gap-x-10">
+        <div className="desk:grid desk:grid-cols-[minmax(0,1.3fr)_minmax(0,1fr)] desk:gap-x-10">
           <div>
             <h1 className="text-front">Change one thing. Write it down. See what followed.</h1>
             <p className="mt-4 text-lead">

@@ -20,10 +20,14 @@ export default function AboutPage() {
       margin={<Caution />}
     >
       <Section title="Who may do what">
-        <table className="table">
-          <thead><tr><th scope="col">Who</th><th scope="col">May</th><th scope="col">Never</th></tr></thead>
-          <tbody>{PEOPLE.map(([who, may, never]) => <tr key={who}><th scope="row">{who}</th><td>{may}</td><td>{never}</td></tr>)}</tbody>
-        </table>
+        <dl className="max-w-text">
+          {PEOPLE.map(([who, may, never]) => (
+            <div key={who} className="border-b border-hairline py-3 desk:grid desk:grid-cols-[9rem_minmax(0,1fr)] desk:gap-x-6">
+              <dt className="font-semibold">{who}</dt>
+              <dd>{may} <span className="block text-soft">{never}</span></dd>
+            </div>
+          ))}
+        </dl>
       </Section>
       <Section title="What it will not do">
         <p className="max-w-text">No doses, no forecasts, nothing sent to a device, no score. Every number shows where it comes from. Where the days can’t tell, it says so.</p>

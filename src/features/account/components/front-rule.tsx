@@ -14,12 +14,12 @@ export function FrontRule() {
       <line x1="40" x2="40" y1="4" y2="296" className="stroke-ink" strokeWidth="3" />
       {NOTCHES.map(({ number, y, words, isWaiting, isLow }) => (
         <g key={number}>
-          <text x="26" y={y + 6} textAnchor="end" className="fill-ink font-serif text-[18px]">{number}</text>
+          <text x="26" y={y + 6} textAnchor="end" className="fill-ink font-serif text-[18px] font-semibold">{number}</text>
           <line x1="40" x2="72" y1={y} y2={y} className="stroke-ink" strokeWidth="4" strokeDasharray={isWaiting ? "5 4" : undefined} />
           <text x="84" y={y + 5} className={`text-[16px] ${isLow ? "fill-low" : "fill-ink"}`}>{words}</text>
         </g>
       ))}
-      <text x="26" y="280" textAnchor="end" className="fill-ink font-serif text-[18px]">0</text>
+      <text x="26" y="280" textAnchor="end" className="fill-ink font-serif text-[18px] font-semibold">0</text>
       <line x1="40" x2="56" y1="274" y2="274" className="stroke-ink" strokeWidth="2.5" />
       <text x="84" y="279" className="fill-soft text-[16px]">the way back</text>
     </svg>

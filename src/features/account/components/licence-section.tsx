@@ -1,4 +1,5 @@
 import { Section } from "@/components/page";
+import { isoDateText } from "@/domain/day-text";
 import { LicenceForm } from "./account-forms";
 
 type Licence = Readonly<{
@@ -29,7 +30,7 @@ export function LicenceSection({ licence }: Readonly<{ licence: Licence | null }
 }
 
 function stateText({ state, expiresOn }: Licence): string {
-  const day = new Intl.DateTimeFormat("en-GB", { timeZone: "UTC", day: "numeric", month: "long", year: "numeric" }).format(new Date(`${expiresOn}T00:00:00Z`));
+  const day = isoDateText(expiresOn);
   if (state === "over") return `It ran out on ${day}; approvals wait for a new one.`;
   return state === "verified" ? `Verified, valid until ${day}.` : "It waits for an administrator to verify it.";
 }

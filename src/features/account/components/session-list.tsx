@@ -13,7 +13,7 @@ export function SessionList({
       {sessions.map((session) => (
         <li key={session.id} className="flex flex-wrap items-center justify-between gap-3 border-b border-hairline py-2">
           <span className="min-w-0 break-words">
-            {session.userAgent.slice(0, 60) || "A browser"} <span className="block text-note text-soft">since {dateTimeText(session.createdAt, timeZone)}</span>
+            {deviceText(session.userAgent)} <span className="block text-note text-soft">since {dateTimeText(session.createdAt, timeZone)}</span>
           </span>
           {session.id === presentId
             ? <span className="text-note text-soft">this one</span>
@@ -22,4 +22,10 @@ export function SessionList({
       ))}
     </ul>
   );
+}
+
+/** A device in plain words, from what its browser says of itself. */
+function deviceText(userAgent: string): string {
+  if (/mobi|android|ip(hone|ad)|tablet/i.test(userAgent)) return "A browser on a phone or tablet";
+  return /^mozilla/i.test(userAgent) ? "A browser on a computer" : "A program";
 }
