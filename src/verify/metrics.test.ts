@@ -1,0 +1,44 @@
+import { existsSync } from "node:fs";
+import { describe, expect, it } from "vitest";
+import { readRows } from "./csv-file";
+import { figuresOf } from "./metrics";
+
+const FOLDER = "../shared/data/glucose";
+const SETS = ["five_people_three", "hall2018_twelve"];
+
+/** Their name, ours, how many of theirs make one of ours, relative tolerance (design page "metrics"). */
+const CHECKS: [string, string, number, number][] = [
+  ["base_n", "readings", 1, 0],
+  ["base_mean", "meanMgDl", 1, 1e-6],
+  ["base_sd", "sdMgDl", 1, 1e-6],
+  ["base_cv", "cvFraction", 100, 1e-6],
+  ["gmi", "gmiPercent", 1, 1e-6],
+  ["base_b54", "veryLowFraction", 100, 1e-6],
+  ["base_r54_69", "lowFraction", 100, 1e-6],
+  ["base_r70_180", "inRangeFraction", 100, 1e-6],
+  ["base_r181_250", "highFraction", 100, 1e-6],
+  ["base_a250", "veryHighFraction", 100, 1e-6],
+  ["base_r70_140", "tightRangeFraction", 100, 1e-6],
+  ["gri", "gri", 1, 1e-6],
+  ["lbgi_10x1.509sq", "lbgi", 1, 1e-4],
+  ["hbgi_10x1.509sq", "hbgi", 1, 1e-4],
+  ["modd", "modd", 1, 0.02],
+  ["conga_24h", "conga", 1, 0.02],
+];
+
+describe.skipIf(!existsSync(FOLDER))("figures against R 4.2 and iglu 4.3.0 on open data (skipped where ../shared is absent)", () => {
+  describe.each(SETS)("%s", (set) => {
+    const folder = existsSync(FOLDER);
+    const ours = folder ? figuresOf(readRows(`${FOLDER}/${set}.csv`)) : [];
+    const theirs = folder ? readRows(`${FOLDER}/${set}_expected.csv`) : [];
+    const people = [...new Set(ours.map((row) => row.id))];
+
+    it.each(CHECKS)("%s is our %s", (theirName, ourName, scale, tolerance) => {
+      for (const id of people) {
+        const expected = Number(theirs.find((row) => row.id === id && row.metric === theirName)?.value) / scale;
+        const got = Number(ours.find((row) => row.id === id && row.metric === ourName)?.value);
+        expect(Math.abs(got - expected), `${id}: ${got} for ${expected}`).toBeLessThanOrEqual(tolerance * Math.abs(expected) + 1e-12);
+      }
+    });
+  });
+});
