@@ -1,13 +1,16 @@
 import { civilOf } from "@/domain/civil-time";
+import { countEpisodes, type Episodes } from "./episodes";
 import { toGrid } from "./grid";
+import { meanAmplitude } from "./mage";
 import type { MetricReading } from "./metric-reading";
+import { percentileProfile, type ProfileStep } from "./percentiles";
 import { bloodGlucoseRisk, glycemiaRisk, type GriZone } from "./risk";
 import { sensorActive } from "./sensor-active";
 import { summarise, type Summary } from "./summary";
 import { conga, meanOfDailyDifferences } from "./variability";
 
 /** Why a figure is null. */
-export type MissingReason = "no-readings" | "one-reading" | "too-few-days" | "no-pair-a-day-apart";
+export type MissingReason = "no-readings" | "one-reading" | "too-few-days" | "no-pair-a-day-apart" | "no-swing";
 
 export type Metrics = { [K in keyof Summary]: Summary[K] | null } & {
   from: string | null;
@@ -21,7 +24,10 @@ export type Metrics = { [K in keyof Summary]: Summary[K] | null } & {
   lbgi: number | null;
   hbgi: number | null;
   modd: number | null;
+  mage: number | null;
   conga: number | null;
+  episodes: Episodes | null;
+  percentiles: ProfileStep[] | null;
   /** A reason for each figure that is null. */
   reasons: Partial<Record<string, MissingReason>>;
 };
@@ -56,14 +62,17 @@ export function metricsOf(unordered: ReadonlyArray<MetricReading>, zone: string,
     griZone: risk?.griZone ?? null,
     ...(bloodGlucoseRisk(readings.map((r) => r.glucoseMgDl)) ?? { lbgi: null, hbgi: null }),
     modd: grid && meanOfDailyDifferences(grid),
+    mage: grid && meanAmplitude(grid),
     conga: grid && conga(grid),
+    episodes: grid && countEpisodes(grid),
+    percentiles: percentileProfile(readings, zone),
   };
   const at = (r: MetricReading | undefined) => (r ? new Date(r.atMs).toISOString() : null);
   return { from: at(readings[0]), to: at(readings.at(-1)), readings: readings.length, days, ...figures, reasons: reasonsFor(figures, readings.length) };
 }
 
 const OWN_REASON: Record<string, MissingReason> = {
-  gmiPercent: "too-few-days", modd: "no-pair-a-day-apart", conga: "no-pair-a-day-apart",
+  gmiPercent: "too-few-days", percentiles: "too-few-days", mage: "no-swing", modd: "no-pair-a-day-apart", conga: "no-pair-a-day-apart",
 };
 
 function reasonsFor(figures: Record<string, unknown>, readings: number): Metrics["reasons"] {
