@@ -21,7 +21,7 @@ export function figuresOf(rows: Record<string, string>[]): Row[] {
       const glucoseMgDl = numberIn(row, "gl");
       return toMetricReading({ atMs: utcMs(row.time ?? ""), value: glucoseMgDl, unit: "mg/dL", glucoseMgDl });
     });
-    return flatten(metricsOf(readings, "UTC", 0)).map(([metric, value]) => ({ id, metric, value }));
+    return flatten(metricsOf(readings, "UTC", { gmiDays: 0 })).map(([metric, value]) => ({ id, metric, value }));
   });
 }
 

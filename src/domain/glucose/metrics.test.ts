@@ -28,6 +28,14 @@ describe("metricsOf", () => {
     expect(metrics).toMatchObject({ days: 1, sensorActiveFraction: 1 });
   });
 
+  it("lets time without readings lower the active share of the span asked for", () => {
+    const span = { fromMs: Date.UTC(2026, 2, 1), toMs: Date.UTC(2026, 2, 15) };
+    const metrics = metricsOf(every5(8 * 288, () => 100), "UTC", { span: { ...span, fromMs: Date.UTC(2026, 2, 2) } });
+    expect(metrics).toMatchObject({ from: "2026-03-02T00:00:00.000Z", to: "2026-03-15T00:00:00.000Z", readings: 7 * 288, days: 7 });
+    expect(metrics.sensorActiveFraction).toBeCloseTo(7 / 13, 10);
+    expect(metricsOf(every5(14 * 288, () => 100), "UTC", { span }).sensorActiveFraction).toBe(1);
+  });
+
   it("has one reason per null figure, and none for the rest, in a short span", () => {
     const metrics = metricsOf(every5(12, (i) => 100 + i), "UTC");
     const nulls = Object.entries(metrics).filter(([, value]) => value === null).map(([name]) => name);

@@ -5,7 +5,7 @@ import { meanAmplitude } from "./mage";
 import type { MetricReading } from "./metric-reading";
 import { percentileProfile, type ProfileStep } from "./percentiles";
 import { bloodGlucoseRisk, glycemiaRisk, type GriZone } from "./risk";
-import { sensorActive } from "./sensor-active";
+import { sensorActive, type Span } from "./sensor-active";
 import { summarise, type Summary } from "./summary";
 import { conga, meanOfDailyDifferences } from "./variability";
 
@@ -46,16 +46,25 @@ const NO_SUMMARY = {
  *
  * @param unordered readings of one source, mg/dL
  * @param zone      the journal's IANA zone
+ * @param span      what was asked for, `toMs` left out: readings outside it are
+ *                  not counted, and time without readings lowers the active
+ *                  share; without one, from the first reading to the last
  * @param gmiDays   days GMI is held back for; 0 only to check the arithmetic
  */
-export function metricsOf(unordered: ReadonlyArray<MetricReading>, zone: string, gmiDays = GMI_DAYS): Metrics {
-  const readings = unordered.toSorted((a, b) => a.atMs - b.atMs);
+export function metricsOf(
+  unordered: ReadonlyArray<MetricReading>,
+  zone: string,
+  { span, gmiDays = GMI_DAYS }: Readonly<{ span?: Span; gmiDays?: number }> = {},
+): Metrics {
+  const readings = unordered
+    .filter((r) => !span || (r.atMs >= span.fromMs && r.atMs < span.toMs))
+    .toSorted((a, b) => a.atMs - b.atMs);
   const days = new Set(readings.map((r) => civilOf(r.atMs, zone).dayNumber)).size;
   const summary = summarise(readings);
   const grid = toGrid(readings, zone);
   const risk = summary && glycemiaRisk(summary);
   const figures = {
-    sensorActiveFraction: grid && sensorActive(readings, grid.intervalMinutes),
+    sensorActiveFraction: grid && sensorActive(readings, grid.intervalMinutes, span),
     ...(summary ?? NO_SUMMARY),
     ...(days < gmiDays ? { gmiPercent: null } : {}),
     gri: risk?.gri ?? null,
@@ -67,8 +76,10 @@ export function metricsOf(unordered: ReadonlyArray<MetricReading>, zone: string,
     episodes: grid && countEpisodes(grid),
     percentiles: percentileProfile(readings, zone),
   };
-  const at = (r: MetricReading | undefined) => (r ? new Date(r.atMs).toISOString() : null);
-  return { from: at(readings[0]), to: at(readings.at(-1)), readings: readings.length, days, ...figures, reasons: reasonsFor(figures, readings.length) };
+  const iso = (atMs: number | undefined) => (atMs === undefined ? null : new Date(atMs).toISOString());
+  const from = iso(span?.fromMs ?? readings[0]?.atMs);
+  const to = iso(span?.toMs ?? readings.at(-1)?.atMs);
+  return { from, to, readings: readings.length, days, ...figures, reasons: reasonsFor(figures, readings.length) };
 }
 
 const OWN_REASON: Record<string, MissingReason> = {
